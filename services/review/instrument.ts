@@ -55,12 +55,10 @@ export const OperatingPoint = z
         ),
       })
       .meta({ id: "OperatingPointByLaw", description: "The straight line that the supply follows." }),
-    z
-      .strictObject({ by: z.literal("stated"), width: Width })
-      .meta({
-        id: "OperatingPointStated",
-        description: "Only claimed: what follows from it proves nothing.",
-      }),
+    z.strictObject({ by: z.literal("stated"), width: Width }).meta({
+      id: "OperatingPointStated",
+      description: "Only claimed: what follows from it proves nothing.",
+    }),
   ])
   .meta({ id: "OperatingPoint", description: "How the working point of a mass filter is known." });
 export type OperatingPoint = z.output<typeof OperatingPoint>;
@@ -95,12 +93,9 @@ const MassFilterStage = z
   .strictObject({
     name: Identifier,
     role: z.literal("mass-filter"),
-    mode: z
-      .enum(["filtering", "rf-only"])
-      .optional()
-      .meta({
-        description: "filtering when absent; rf-only when the rods pass ions without selecting them.",
-      }),
+    mode: z.enum(["filtering", "rf-only"]).optional().meta({
+      description: "filtering when absent; rf-only when the rods pass ions without selecting them.",
+    }),
     operatingPoint: OperatingPoint.optional().meta({ description: "Required unless mode is rf-only." }),
     rf: Rf.optional().meta({ description: "The RF voltage of a mass filter run as rf-only." }),
     rodSet: RodSet.optional(),

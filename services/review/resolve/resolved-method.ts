@@ -1,0 +1,75 @@
+import type { RodSet } from "../../contract/rod-set.ts";
+import type { Width } from "../../contract/width.ts";
+import type { Acquisition, Polarity } from "../acquisition.ts";
+import type { Evidence } from "../finding.ts";
+import type { CellRf, Instrument, MassFilterStage, Stage } from "../instrument.ts";
+import type { Method } from "../method.ts";
+import type { Window } from "./window.ts";
+
+/** A stage with the place where it stands in the request. */
+export interface Placed<S extends Stage> {
+  readonly stage: S;
+  readonly pointer: string;
+}
+
+/** One ion, or one end of a scan, set at one mass filter. */
+export interface Filtering {
+  readonly acquisition: Acquisition;
+  readonly filter: Placed<MassFilterStage>;
+  /** A scan has no ion: its two ends stand for it. */
+  readonly target: "ion" | "scan-end";
+  readonly pointer: string;
+  readonly ion: string;
+  readonly mz: number;
+  readonly setMz: number;
+  readonly setMzStated: boolean;
+  readonly setMzPointer: string;
+  /** Window that the method claims. */
+  readonly claim: { readonly width: Width; readonly pointer: string } | null;
+  readonly window: Window;
+}
+
+/** An RF-only stage as one acquisition sets it. */
+export interface Guiding {
+  readonly acquisition: Acquisition;
+  readonly placed: Placed<Stage>;
+  readonly rodSet: RodSet | null;
+  readonly polePairs: number;
+  /** How the RF is set and where that stands, null where nothing is stated. */
+  readonly setting: { readonly rf: CellRf; readonly pointer: string } | null;
+  /** Zero-to-peak, pole-to-ground; null where it does not follow from what is stated. */
+  readonly rfVolts: number | null;
+  readonly rfMissing: readonly string[];
+  /** Low-mass cutoff in m/z; null where it does not follow, or is not defined (more than two pole pairs). */
+  readonly cutoffMz: number | null;
+  readonly cutoffMissing: readonly string[];
+  readonly evidence: Evidence;
+  /** Ions that must get through, and the one that enters; m/z of a scan's lower end where it has no ion. */
+  readonly precursor: GuidedIon | null;
+  readonly product: GuidedIon | null;
+}
+
+export interface GuidedIon {
+  readonly pointer: string;
+  readonly ion: string;
+  readonly mz: number;
+  readonly setMz: number;
+}
+
+export interface ResolvedAcquisition {
+  readonly acquisition: Acquisition;
+  readonly pointer: string;
+  readonly polarity: Polarity;
+  readonly filterings: readonly Filtering[];
+  /** The collision cell for each pair of a precursor and a product: one in a transition, two in a scan. */
+  readonly cells: readonly Guiding[];
+}
+
+/** Instrument and method brought together once; every check reads it and none computes it again. */
+export interface ResolvedMethod {
+  readonly instrument: Instrument;
+  readonly method: Method;
+  readonly stages: readonly Placed<Stage>[];
+  readonly filters: readonly Placed<MassFilterStage>[];
+  readonly acquisitions: readonly ResolvedAcquisition[];
+}

@@ -1,0 +1,57 @@
+import type { CanonicalVolts, VoltageConvention } from "../../contract/drive.ts";
+import type { WidthHeight } from "../../contract/width.ts";
+import type { Evidence } from "../finding.ts";
+
+/** What a mass filter lets through at one set m/z, as far as it is known. */
+export type Window =
+  | {
+      readonly kind: "window";
+      readonly mzLow: number;
+      readonly mzHigh: number;
+      /** The height at which low and high were taken. */
+      readonly height: WidthHeight;
+      readonly evidence: Evidence;
+      /** Volts behind the window, and the convention in which the laboratory states them. */
+      readonly drive: { readonly volts: CanonicalVolts; readonly convention: VoltageConvention } | null;
+      /** Said in every statement that uses the window: an extrapolation, for instance. */
+      readonly note: string | null;
+      /** Pointer of the input that sets the width. */
+      readonly widthPointer: string;
+    }
+  | {
+      readonly kind: "empty";
+      readonly reason: string;
+      readonly evidence: Evidence;
+      readonly ratioPointer: string;
+    }
+  | { readonly kind: "unknown"; readonly missing: readonly string[]; readonly reason: string };
+
+export type KnownWindow = Extract<Window, { kind: "window" }>;
+
+export function widthOf(window: KnownWindow): number {
+  return window.mzHigh - window.mzLow;
+}
+
+export function centreOf(window: KnownWindow): number {
+  return (window.mzLow + window.mzHigh) / 2;
+}
+
+/**
+ * Whether a window taken at its height may stand for the one between the stability edges. It may where that is the
+ * careful side: a peak is narrower at half height and wider at a tenth than between its edges.
+ */
+export function standsForEdges(window: KnownWindow, careful: "narrow" | "wide"): boolean {
+  if (window.height === "edges") return true;
+  return window.height === (careful === "narrow" ? "half-height" : "tenth-height");
+}
+
+/** The sentence that says for what the window was taken, empty where it was taken between the edges. */
+export function heightNote(window: KnownWindow): string {
+  const taken =
+    window.height === "half-height"
+      ? " The width at half height stands for the wider one between the edges, which is the careful side."
+      : window.height === "tenth-height"
+        ? " The width at a tenth of the height stands for the narrower one between the edges, which is the careful side."
+        : "";
+  return taken + (window.note === null ? "" : ` ${window.note}`);
+}
