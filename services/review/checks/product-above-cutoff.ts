@@ -9,25 +9,38 @@ import { digits } from "../statement.ts";
 export const productAboveCutoff = defineCheck({
   id: "product-above-cutoff",
   computes:
-    "m/z of the product ion over the low-mass cutoff of the RF-only collision cell as the acquisition sets it.",
+    "m/z of the product ion over the low-mass cutoff of the RF-only collision cell as the acquisition sets it, and of the lightest ion over the cutoff of each rod set that only passes ions.",
   needs: ["stages/rf", "stages/rodSet", "acquisition/cell/rf", "acquisition/product"],
-  quantities: [{ quantity: "product-over-cutoff", unit: "1", meaning: "product m/z over cutoff m/z" }],
+  quantities: [
+    { quantity: "product-over-cutoff", unit: "1", meaning: "product m/z over the cutoff of the cell" },
+    {
+      quantity: "ion-over-cutoff",
+      unit: "1",
+      meaning: "lightest m/z over the cutoff of a guide or an RF-only filter",
+    },
+  ],
   requiredByDefault: true,
   limit: LowerLimit,
   defaults: { pass: { min: 1.2 }, caution: { min: 1.05 } },
   basis:
     "Nothing below q = 0.908 is confined and acceptance falls to zero at the cutoff; 1.20 and 1.05 are common practice, no source.",
-  examine: (method, limits) =>
-    method.acquisitions.flatMap(({ cells }) =>
-      cells.map((cell) => productOverCutoff(cell, boundsOf(limits.pass), boundsOf(limits.caution))),
-    ),
+  examine: ({ acquisitions, guides }, limits) => {
+    const pass = boundsOf(limits.pass);
+    const caution = boundsOf(limits.caution);
+    return [
+      ...guides.map((guide) => overCutoff(guide, "ion-over-cutoff", pass, caution)),
+      ...acquisitions.flatMap(({ cells }) =>
+        cells.map((cell) => overCutoff(cell, "product-over-cutoff", pass, caution)),
+      ),
+    ];
+  },
 });
 
-function productOverCutoff(cell: Guiding, pass: Bounds, caution: Bounds): Observation {
+function overCutoff(cell: Guiding, quantity: string, pass: Bounds, caution: Bounds): Observation {
   const { stage } = cell.placed;
   const product = cell.product!;
   const about = {
-    quantity: "product-over-cutoff",
+    quantity,
     unit: "1",
     subject: {
       pointer: product.pointer,
@@ -65,7 +78,7 @@ function productOverCutoff(cell: Guiding, pass: Bounds, caution: Bounds): Observ
   }
   const value = product.mz / cell.cutoffMz;
   const place =
-    value < 1 ? "below the cutoff: the ion is lost in the cell" : `${digits(value, 4)} times the cutoff`;
+    value < 1 ? "below the cutoff: the ion is lost there" : `${digits(value, 4)} times the cutoff`;
   return {
     ...about,
     kind: "value",
@@ -74,7 +87,7 @@ function productOverCutoff(cell: Guiding, pass: Bounds, caution: Bounds): Observ
     pass,
     caution,
     passesIf: passesIfLower(cell, value, pass.min),
-    statement: `Product m/z ${product.mz} is ${place} (cutoff m/z ${digits(cell.cutoffMz, 5)}) in ${stage.name}.`,
+    statement: `m/z ${product.mz} is ${place} (cutoff m/z ${digits(cell.cutoffMz, 5)}) in ${stage.name}.`,
   };
 }
 

@@ -1,17 +1,11 @@
-import {
-  type CanonicalVolts,
-  conventionOf,
-  driveToCanonical,
-  rfToCanonical,
-  type VoltageConvention,
-} from "../../contract/drive.ts";
+import { conventionOf, driveToCanonical, rfToCanonical } from "../../contract/drive.ts";
 import { fieldOf } from "../../contract/rod-set.ts";
 import { type Width, widthInMz } from "../../contract/width.ts";
 import { passbandOf } from "../../physics/passband.ts";
 import type { MassFilterStage, OperatingPoint } from "../instrument.ts";
 import { interpolate } from "./interpolate.ts";
 import type { Placed } from "./resolved-method.ts";
-import type { Window } from "./window.ts";
+import type { Window, WindowDrive } from "./window.ts";
 
 type Of<By extends OperatingPoint["by"]> = Extract<OperatingPoint, { by: By }>;
 
@@ -102,19 +96,13 @@ function statedWindow(claim: Claim, setMz: number): Window {
   };
 }
 
-/** Volts of a stage at a set m/z, with the convention in which the laboratory states them. */
-export interface VoltsSetting {
-  readonly volts: CanonicalVolts;
-  readonly convention: VoltageConvention;
-  readonly ratioPointer: string;
+/** Volts of a stage at a set m/z, and what has to be said of them. */
+export interface VoltsSetting extends WindowDrive {
   readonly note: string | null;
 }
 
 /** Volts at a set m/z on the lines between the points or on the stated law; null where one point does not reach. */
-export function voltsAt(
-  operatingPoint: Of<"drives"> | Of<"drive-law">,
-  setMz: number,
-): Omit<VoltsSetting, "ratioPointer"> | null {
+export function voltsAt(operatingPoint: Of<"drives"> | Of<"drive-law">, setMz: number): VoltsSetting | null {
   if (operatingPoint.by === "drive-law") {
     const { rfPerMz, dcSlope, dcOffset_V } = operatingPoint;
     const rfVolts = rfToCanonical(rfPerMz) * setMz;
@@ -149,11 +137,7 @@ export function voltsAt(
   };
 }
 
-function computedWindow(
-  filter: Placed<MassFilterStage>,
-  setting: Omit<VoltsSetting, "ratioPointer">,
-  pointer: string,
-): Window {
+function computedWindow(filter: Placed<MassFilterStage>, setting: VoltsSetting, pointer: string): Window {
   const { rodSet } = filter.stage;
   if (rodSet === undefined) {
     return {
@@ -163,13 +147,13 @@ function computedWindow(
     };
   }
   const { rfVolts, dcVolts } = setting.volts;
-  const ratioPointer = pointer;
+  const drive: WindowDrive = { volts: setting.volts, convention: setting.convention };
   if (rfVolts <= 0 || dcVolts < 0) {
     return {
       kind: "empty",
       reason: rfVolts <= 0 ? "There is no RF voltage." : "The DC voltage of the line is negative.",
       evidence: "computed",
-      ratioPointer,
+      drive,
     };
   }
   const answer = passbandOf(dcVolts, rfVolts, fieldOf(rodSet));
@@ -178,7 +162,7 @@ function computedWindow(
       kind: "empty",
       reason: `U/V is ${(dcVolts / rfVolts).toPrecision(7)}, above the apex of the stability region: no m/z passes.`,
       evidence: "computed",
-      ratioPointer,
+      drive,
     };
   }
   if (answer.kind === "not-converged") {
@@ -202,7 +186,7 @@ function computedWindow(
     mzHigh,
     height: "edges",
     evidence: "computed",
-    drive: { volts: setting.volts, convention: setting.convention },
+    drive,
     note: setting.note,
     widthPointer: pointer,
   };

@@ -4,6 +4,7 @@ import type { Width } from "../../contract/width.ts";
 import type { Acquisition } from "../acquisition.ts";
 import type { Instrument, MassFilterStage, Stage } from "../instrument.ts";
 import type { Method } from "../method.ts";
+import { guidesOf } from "./guides.ts";
 import { guidingOf } from "./guiding.ts";
 import { windowAt } from "./operating-point.ts";
 import { cellOf, filterAfterCell, filterBeforeCell, filterNamed, filtersOf, placedStages } from "./path.ts";
@@ -15,6 +16,7 @@ import type {
   ResolvedAcquisition,
   ResolvedMethod,
 } from "./resolved-method.ts";
+import { scheduleOf } from "./schedule.ts";
 
 /**
  * Brings instrument and method together once: ions to m/z, set points to windows, cell settings to volts and cutoffs.
@@ -28,14 +30,17 @@ export function resolveMethod(instrument: Instrument, method: Method): ResolvedM
     after: filterAfterCell(stages),
     cell: cellOf(stages),
   };
+  const acquisitions = method.acquisition.map((acquisition, index) =>
+    resolveAcquisition(acquisition, `/method/acquisition/${index}`, path, method),
+  );
   return {
     instrument,
     method,
     stages,
     filters: filtersOf(stages),
-    acquisitions: method.acquisition.map((acquisition, index) =>
-      resolveAcquisition(acquisition, `/method/acquisition/${index}`, path, method),
-    ),
+    acquisitions,
+    guides: guidesOf(stages, acquisitions),
+    schedule: scheduleOf(method),
   };
 }
 

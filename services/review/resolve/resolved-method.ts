@@ -4,6 +4,7 @@ import type { Acquisition, Polarity } from "../acquisition.ts";
 import type { Evidence } from "../finding.ts";
 import type { CellRf, Instrument, MassFilterStage, Stage } from "../instrument.ts";
 import type { Method } from "../method.ts";
+import type { Schedule } from "./schedule.ts";
 import type { Window } from "./window.ts";
 
 /** A stage with the place where it stands in the request. */
@@ -44,7 +45,7 @@ export interface Guiding {
   readonly cutoffMz: number | null;
   readonly cutoffMissing: readonly string[];
   readonly evidence: Evidence;
-  /** Ions that must get through, and the one that enters; m/z of a scan's lower end where it has no ion. */
+  /** The ion that enters the cell and the one that must leave it; a guide has only the one that must get through. */
   readonly precursor: GuidedIon | null;
   readonly product: GuidedIon | null;
 }
@@ -72,4 +73,7 @@ export interface ResolvedMethod {
   readonly stages: readonly Placed<Stage>[];
   readonly filters: readonly Placed<MassFilterStage>[];
   readonly acquisitions: readonly ResolvedAcquisition[];
+  /** Rod sets that only pass ions, each with the lightest ion it must pass. */
+  readonly guides: readonly Guiding[];
+  readonly schedule: Schedule;
 }

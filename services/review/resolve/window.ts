@@ -2,6 +2,12 @@ import type { CanonicalVolts, VoltageConvention } from "../../contract/drive.ts"
 import type { WidthHeight } from "../../contract/width.ts";
 import type { Evidence } from "../finding.ts";
 
+/** Volts with the convention in which the laboratory states them. */
+export interface WindowDrive {
+  readonly volts: CanonicalVolts;
+  readonly convention: VoltageConvention;
+}
+
 /** What a mass filter lets through at one set m/z, as far as it is known. */
 export type Window =
   | {
@@ -11,8 +17,8 @@ export type Window =
       /** The height at which low and high were taken. */
       readonly height: WidthHeight;
       readonly evidence: Evidence;
-      /** Volts behind the window, and the convention in which the laboratory states them. */
-      readonly drive: { readonly volts: CanonicalVolts; readonly convention: VoltageConvention } | null;
+      /** Volts behind the window, null where it was measured or claimed. */
+      readonly drive: WindowDrive | null;
       /** Said in every statement that uses the window: an extrapolation, for instance. */
       readonly note: string | null;
       /** Pointer of the input that sets the width. */
@@ -22,7 +28,7 @@ export type Window =
       readonly kind: "empty";
       readonly reason: string;
       readonly evidence: Evidence;
-      readonly ratioPointer: string;
+      readonly drive: WindowDrive;
     }
   | { readonly kind: "unknown"; readonly missing: readonly string[]; readonly reason: string };
 

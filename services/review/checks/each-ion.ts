@@ -1,0 +1,32 @@
+import type { Observation } from "../observation.ts";
+import type { Filtering, ResolvedMethod } from "../resolve/resolved-method.ts";
+
+/**
+ * One observation for every ion that a filter selects; where `observe` has nothing to say of any ion of a stage, one
+ * sentence for the stage in place of one for each ion.
+ */
+export function eachIon(
+  method: ResolvedMethod,
+  quantity: string,
+  whyNot: string,
+  observe: (filtering: Filtering) => Observation | null,
+  targets: readonly Filtering["target"][] = ["ion"],
+): Observation[] {
+  return method.filters.flatMap((filter) => {
+    const observations = method.acquisitions.flatMap(({ filterings }) =>
+      filterings
+        .filter((filtering) => filtering.filter === filter && targets.includes(filtering.target))
+        .flatMap((filtering) => observe(filtering) ?? []),
+    );
+    if (observations.length > 0) return observations;
+    return [
+      {
+        kind: "not-applicable",
+        quantity,
+        unit: "1",
+        subject: { pointer: filter.pointer, stage: filter.stage.name },
+        statement: `The method ${whyNot} in ${filter.stage.name}.`,
+      },
+    ];
+  });
+}

@@ -1,0 +1,136 @@
+import { flightTimeOf } from "../../contract/residence.ts";
+import { defineCheck } from "../check.ts";
+import type { Bounds } from "../finding.ts";
+import { boundsOf, LowerLimit } from "../limit.ts";
+import type { Observation } from "../observation.ts";
+import { previousWithSameProduct } from "../resolve/predecessor.ts";
+import type { ResolvedAcquisition, ResolvedMethod } from "../resolve/resolved-method.ts";
+import { digits } from "../statement.ts";
+
+export const pauseTime = defineCheck({
+  id: "pause-time",
+  computes:
+    "Pause before an acquisition over the time that the voltages need to settle and the ion to fly through all stages, and the cell to clear where the acquisition before it has the same product.",
+  needs: [
+    "acquisition/pause_ms",
+    "stages/settle_ms",
+    "stages/residence",
+    "stages/clearing_ms",
+    "acquisition/retention",
+  ],
+  quantities: [
+    { quantity: "pause-over-needed", unit: "1", meaning: "pause over settling, flight and clearing" },
+  ],
+  requiredByDefault: true,
+  limit: LowerLimit,
+  defaults: { pass: { min: 1 }, caution: { min: 1 } },
+  basis:
+    "A shorter pause lets ions of one set point be counted at the next (cross-talk): common practice, no source.",
+  examine: (method, limits) =>
+    method.acquisitions.map((each) =>
+      pauseOverNeeded(method, each, boundsOf(limits.pass), boundsOf(limits.caution)),
+    ),
+});
+
+function pauseOverNeeded(
+  method: ResolvedMethod,
+  each: ResolvedAcquisition,
+  pass: Bounds,
+  caution: Bounds,
+): Observation {
+  const { acquisition, pointer } = each;
+  const about = {
+    quantity: "pause-over-needed",
+    unit: "1",
+    subject: { pointer, acquisition: acquisition.id },
+  };
+  const missing: string[] = [];
+  if (acquisition.pause_ms === undefined) missing.push(`${pointer}/pause_ms`);
+  const settle_ms = settling(method, each, missing);
+  const flight_ms = flight(method, each, missing);
+  const previous = previousWithSameProduct(method, each);
+  const clearing_ms = previous === null ? 0 : clearing(method, missing);
+  if (missing.length > 0) {
+    return {
+      ...about,
+      kind: "indeterminate",
+      missing,
+      statement: `The pause before ${acquisition.id} cannot be judged without ${missing.join(", ")}.`,
+    };
+  }
+  const needed_ms = settle_ms + flight_ms + clearing_ms;
+  const pause_ms = acquisition.pause_ms!;
+  if (needed_ms === 0) {
+    return {
+      ...about,
+      kind: "not-applicable",
+      statement: "Settling, flight and clearing are stated to take no time.",
+    };
+  }
+  return {
+    ...about,
+    kind: "value",
+    value: pause_ms / needed_ms,
+    evidence: "computed",
+    pass,
+    caution,
+    passesIf:
+      pass.min === null
+        ? null
+        : { input: `${pointer}/pause_ms`, min: pass.min * needed_ms, max: null, unit: "ms" },
+    statement:
+      `${acquisition.id} pauses for ${digits(pause_ms, 4)} ms; settling takes ${digits(settle_ms, 4)} ms and the flight ${digits(flight_ms, 4)} ms` +
+      (previous === null
+        ? "."
+        : `, and the cell clears in ${digits(clearing_ms, 4)} ms because ${previous.acquisition.id} before it has the same product.`),
+  };
+}
+
+/** All stages settle at the same time, so the slowest decides. */
+function settling(method: ResolvedMethod, { filterings }: ResolvedAcquisition, missing: string[]): number {
+  let slowest = 0;
+  for (const { stage, pointer } of method.filters) {
+    if (!filterings.some(({ filter }) => filter.pointer === pointer)) continue;
+    if (stage.settle_ms === undefined) missing.push(`${pointer}/settle_ms`);
+    else slowest = Math.max(slowest, stage.settle_ms);
+  }
+  return slowest;
+}
+
+/** Flight of the heaviest ion through the filters, and through every other stage whose residence is stated. */
+function flight(
+  method: ResolvedMethod,
+  { filterings, cells }: ResolvedAcquisition,
+  missing: string[],
+): number {
+  let total_ms = 0;
+  const heaviest = Math.max(...filterings.map(({ mz }) => mz));
+  const cell = method.stages.findIndex(({ stage }) => stage.role === "collision-cell");
+  const product = Math.max(...cells.map((each) => each.product?.mz ?? 0));
+  method.stages.forEach(({ stage, pointer }, index) => {
+    if (stage.role === "ion-trap") return;
+    const selects = filterings.some(({ filter }) => filter.pointer === pointer);
+    const { residence, rodSet } = stage;
+    if (residence === undefined) {
+      if (selects) missing.push(`${pointer}/residence`);
+      return;
+    }
+    if ("flightTime_us" in residence) {
+      total_ms += residence.flightTime_us / 1e3;
+      return;
+    }
+    const mz = cell >= 0 && index > cell ? product : heaviest;
+    const time = rodSet === undefined ? null : flightTimeOf(residence, rodSet, mz);
+    if (time === null)
+      missing.push(rodSet === undefined ? `${pointer}/rodSet` : `${pointer}/rodSet/rodLength_mm`);
+    else total_ms += time * 1e3;
+  });
+  return total_ms;
+}
+
+function clearing(method: ResolvedMethod, missing: string[]): number {
+  const cell = method.stages.find(({ stage }) => stage.role === "collision-cell");
+  if (cell?.stage.role !== "collision-cell") return 0;
+  if (cell.stage.clearing_ms === undefined) missing.push(`${cell.pointer}/clearing_ms`);
+  return cell.stage.clearing_ms ?? 0;
+}

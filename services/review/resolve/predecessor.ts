@@ -1,0 +1,35 @@
+import type { ResolvedAcquisition, ResolvedMethod } from "./resolved-method.ts";
+import { widthOf } from "./window.ts";
+
+/** Half of the window a product is taken to pass where its filter's is not known: a unit-mass window. */
+const HALF_UNIT_WINDOW = 0.5;
+
+/**
+ * The acquisition that comes before this one at some moment of the schedule and puts another precursor's ions of the
+ * same product into the cell, or null. The last acquisition of a round comes before the first of the next.
+ */
+export function previousWithSameProduct(
+  method: ResolvedMethod,
+  each: ResolvedAcquisition,
+): ResolvedAcquisition | null {
+  const own = method.acquisitions.indexOf(each);
+  for (const { active } of method.schedule.moments) {
+    const place = active.indexOf(own);
+    if (place < 0 || active.length < 2) continue;
+    const previous = method.acquisitions[active[(place + active.length - 1) % active.length]!]!;
+    if (sharesProduct(previous, each)) return previous;
+  }
+  return null;
+}
+
+function sharesProduct(previous: ResolvedAcquisition, each: ResolvedAcquisition): boolean {
+  if (previous.acquisition.kind !== "transition" || each.acquisition.kind !== "transition") return false;
+  const [precursor, product] = each.filterings;
+  const [previousPrecursor, previousProduct] = previous.filterings;
+  if (!precursor || !product || !previousPrecursor || !previousProduct) return false;
+  const { window } = product;
+  const half = window.kind === "window" ? widthOf(window) / 2 : HALF_UNIT_WINDOW;
+  const sameProduct = Math.abs(previousProduct.mz - product.setMz) <= half;
+  const samePrecursor = Math.abs(previousPrecursor.setMz - precursor.setMz) <= HALF_UNIT_WINDOW;
+  return sameProduct && !samePrecursor;
+}
