@@ -9,7 +9,7 @@ import { nearOriginEdgeResidual } from "./near-origin-edge.ts";
 import { polynomial } from "./polynomial.ts";
 
 /** Below this U/V the low-q edge is measured from the origin, above it from the apex. */
-const NEAR_ORIGIN_RATIO = 0.085;
+export const NEAR_ORIGIN_RATIO = 0.085;
 
 /** (q − q_apex)/μ of the low-q edge, powers of μ. */
 const LOW_START = [

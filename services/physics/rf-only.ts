@@ -10,17 +10,20 @@ export const CUTOFF_Q = RF_ONLY_LIMIT_Q;
 export const SECOND_WINDOW_Q_LOW = 7.513610299420813;
 export const SECOND_WINDOW_Q_HIGH = 7.579690373736909;
 
-/** m/z below which no ion is stable without DC, the second window apart. Volts in V, field in m and Hz; null without RF. */
-export function lowMassCutoff(rfVolts: number, field: Field): number | null {
-  return rfVolts === 0 ? null : mzOf(CUTOFF_Q, Math.abs(rfVolts), field);
+/**
+ * m/z below which no ion is stable without DC, the second window apart. Volts in V, field in m and Hz. Without RF it is
+ * 0 and means nothing: then no ion is held.
+ */
+export function lowMassCutoff(rfVolts: number, field: Field): number {
+  return mzOf(CUTOFF_Q, Math.abs(rfVolts), field);
 }
 
-/** The narrow second window in m/z, near 0.12 of the cutoff, in which light ions are stable again; null without RF. */
-export function secondWindow(rfVolts: number, field: Field): { mzLow: number; mzHigh: number } | null {
-  if (rfVolts === 0) return null;
+/** The narrow second window in m/z, near 0.12 of the cutoff, in which light ions are stable again. */
+export function secondWindow(rfVolts: number, field: Field): { mzLow: number; mzHigh: number } {
+  const magnitude = Math.abs(rfVolts);
   return {
-    mzLow: mzOf(SECOND_WINDOW_Q_HIGH, Math.abs(rfVolts), field),
-    mzHigh: mzOf(SECOND_WINDOW_Q_LOW, Math.abs(rfVolts), field),
+    mzLow: mzOf(SECOND_WINDOW_Q_HIGH, magnitude, field),
+    mzHigh: mzOf(SECOND_WINDOW_Q_LOW, magnitude, field),
   };
 }
 
