@@ -1,8 +1,8 @@
+import { fileURLToPath } from "node:url";
 import { defineConfig } from "vitest/config";
 
 export default defineConfig({
-  resolve: { conditions: ["rodset-source"] },
-  ssr: { resolve: { conditions: ["rodset-source", "node", "import", "default"] } },
+  resolve: { alias: { "@rodset/sdk": fileURLToPath(new URL("./sdk/src/index.ts", import.meta.url)) } },
   test: {
     include: ["test/**/*.test.ts"],
     testTimeout: 60_000,

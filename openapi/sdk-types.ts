@@ -1,0 +1,23 @@
+import openapiTS, { astToString, type OpenAPI3 } from "openapi-typescript";
+
+const NOTICE = "// Generated from openapi/openapi.json; `npm run generate` writes it anew.\n";
+
+/** The types of every request and answer. Members with a default stay optional in requests. */
+export async function sdkSchema(document: unknown): Promise<string> {
+  return NOTICE + astToString(await openapiTS(document as OpenAPI3, { defaultNonNullable: false }));
+}
+
+/** What the client needs of each operation at run time: method, path, and whether it takes a body. */
+export function sdkOperations(document: unknown): string {
+  const { paths } = document as { paths: Record<string, Record<string, { operationId?: string; requestBody?: unknown }>> };
+  const entries = Object.entries(paths).flatMap(([path, methods]) =>
+    Object.entries(methods).flatMap(([method, { operationId, requestBody }]) =>
+      operationId === undefined
+        ? []
+        : [
+            `  ${operationId}: { method: ${JSON.stringify(method.toUpperCase())}, path: ${JSON.stringify(path)}, takesBody: ${requestBody !== undefined} },`,
+          ],
+    ),
+  );
+  return `${NOTICE}export const OPERATIONS = {\n${entries.join("\n")}\n} as const;\n`;
+}

@@ -1,0 +1,56 @@
+import { RodsetUnexpectedAnswer } from "./errors.ts";
+import { type CallOptions, type ClientOptions, exchange, parsed } from "./exchange.ts";
+import { OPERATIONS } from "./generated/operations.ts";
+import type { operations } from "./generated/schema.ts";
+
+export type OperationId = keyof typeof OPERATIONS;
+
+/** What an operation takes; never where it takes nothing. */
+export type RequestOf<Id extends OperationId> = operations[Id] extends {
+  requestBody: { content: { "application/json": infer Request } };
+}
+  ? Request
+  : never;
+
+/** What an operation answers. */
+export type AnswerOf<Id extends OperationId> = operations[Id] extends {
+  responses: { 200: { content: { "application/json": infer Answer } } };
+}
+  ? Answer
+  : never;
+
+/** Media types of an operation's answer beside JSON. */
+export type FormOf<Id extends OperationId> = operations[Id] extends { responses: { 200: { content: infer Content } } }
+  ? Exclude<keyof Content, "application/json"> & string
+  : never;
+
+type Arguments<Id extends OperationId> = [RequestOf<Id>] extends [never]
+  ? [options?: CallOptions]
+  : [request: RequestOf<Id>, options?: CallOptions];
+
+/** One method for each operation of the service, and `form` for answers in another media type than JSON. */
+export type Client = {
+  readonly [Id in OperationId]: (...args: Arguments<Id>) => Promise<AnswerOf<Id>>;
+} & {
+  /** The answer of an operation as text in another of its media types, a report for instance. */
+  form<Id extends OperationId>(id: Id, mediaType: FormOf<Id>, ...args: Arguments<Id>): Promise<string>;
+};
+
+/** A client of the service at `baseUrl`. It holds no connection and no state of its own. */
+export function createClient(options: ClientOptions): Client {
+  const call = (id: OperationId, mediaType: string, args: readonly unknown[]): Promise<string> => {
+    const { method, path, takesBody } = OPERATIONS[id];
+    const [body, callOptions] = takesBody ? args : [undefined, args[0]];
+    return exchange(options, { ...(callOptions as CallOptions | undefined), method, path, body, mediaType });
+  };
+  const methods = Object.keys(OPERATIONS).map((id) => [
+    id,
+    async (...args: unknown[]) => {
+      const answer = parsed(await call(id as OperationId, "application/json", args));
+      if (answer === null) throw new RodsetUnexpectedAnswer(200, "application/json without JSON in it");
+      return answer;
+    },
+  ]);
+  const form: Client["form"] = (id, mediaType, ...args) => call(id, mediaType, args);
+  return { ...Object.fromEntries(methods), form } as Client;
+}
