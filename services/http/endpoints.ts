@@ -1,0 +1,21 @@
+import type { AnyEndpoint } from "./endpoint.ts";
+import { about } from "./endpoints/about.ts";
+import { mathieuParameters } from "./endpoints/mathieu-parameters.ts";
+import { passband } from "./endpoints/passband.ts";
+import { problems } from "./endpoints/problems.ts";
+import { rfOnly } from "./endpoints/rf-only.ts";
+import { setPoints } from "./endpoints/set-points.ts";
+import { stability } from "./endpoints/stability.ts";
+import { transit } from "./endpoints/transit.ts";
+
+/** Every question the service answers, in the order of the document. */
+export const ENDPOINTS: readonly AnyEndpoint[] = [
+  stability,
+  mathieuParameters,
+  rfOnly,
+  transit,
+  passband,
+  setPoints,
+  about,
+  problems,
+];

@@ -1,0 +1,61 @@
+import { z } from "zod";
+import { CAUTIONS } from "../../contract/cautions.ts";
+import { CONSTANTS_EDITION } from "../../physics/constants.ts";
+import { DOMAIN_LIMIT } from "../../physics/stability.ts";
+import { defineEndpoint } from "../endpoint.ts";
+import { MOST_ITEMS } from "../limits.ts";
+import { VERSION } from "../version.ts";
+
+const About = z
+  .strictObject({
+    service: z.string(),
+    version: z.string().meta({ description: "The same version gives the same answer to the same request." }),
+    constants: z.string().meta({ description: "Edition of the physical constants." }),
+    limits: z.strictObject({
+      body_kB: z.int().meta({ description: "Largest request body in kB (1000 bytes)." }),
+      itemsPerRequest: z.int().meta({ description: "Most ions, points or targets in one request." }),
+      stepsPerSolution: z.int().meta({ description: "Steps after which a solver answers not-converged." }),
+      mathieuParameters: z
+        .number()
+        .meta({ description: "Largest |a| and |q| for which stability is computed." }),
+    }),
+    cautions: z.array(z.string()).meta({ description: "What must be known before a result is used." }),
+  })
+  .meta({ id: "About" });
+
+export const about = defineEndpoint({
+  operationId: "about",
+  method: "get",
+  path: "/v1/about",
+  tag: "Service",
+  summary: "Version, edition of the constants, limits and cautions",
+  description: "Nothing in this answer changes while the service runs.",
+  request: null,
+  work: null,
+  answer: About,
+  examples: {
+    "this-version": {
+      summary: "With the default settings",
+      request: null,
+      answer: {
+        service: "rodset",
+        version: VERSION,
+        constants: "CODATA 2022",
+        limits: { body_kB: 512, itemsPerRequest: 1000, stepsPerSolution: 200, mathieuParameters: 12 },
+        cautions: [...CAUTIONS],
+      },
+    },
+  },
+  handler: (_request, { bodyLimit_kB, maxSteps }) => ({
+    service: "rodset",
+    version: VERSION,
+    constants: CONSTANTS_EDITION,
+    limits: {
+      body_kB: bodyLimit_kB,
+      itemsPerRequest: MOST_ITEMS,
+      stepsPerSolution: maxSteps,
+      mathieuParameters: DOMAIN_LIMIT,
+    },
+    cautions: [...CAUTIONS],
+  }),
+});

@@ -1,0 +1,54 @@
+import express, { type RequestHandler } from "express";
+import { ProblemError } from "./problem-document.ts";
+
+const JSON_MEDIA_TYPE = /^application\/json(?:[ \t]*;[ \t]*charset=(?:utf-8|"utf-8"))?[ \t]*$/i;
+
+/** Reads a JSON body of at most `limit_kB`, and nothing that calls itself otherwise. */
+export function jsonBody(limit_kB: number): RequestHandler[] {
+  return [
+    requireJson,
+    express.json({ type: () => true, inflate: false, limit: limit_kB * 1000, strict: true }),
+    requireBody,
+  ];
+}
+
+const requireJson: RequestHandler = (request, _response, next) => {
+  const mediaType = request.headers["content-type"];
+  if (mediaType === undefined) {
+    throw new ProblemError("unsupported-media-type", "Content-Type is missing; it must be application/json.");
+  }
+  if (!JSON_MEDIA_TYPE.test(mediaType)) {
+    throw new ProblemError(
+      "unsupported-media-type",
+      "Content-Type must be application/json, with no parameter or with charset=utf-8.",
+    );
+  }
+  next();
+};
+
+const requireBody: RequestHandler = (request, _response, next) => {
+  if (request.body === undefined) throw new ProblemError("malformed-json", "The body is empty.");
+  next();
+};
+
+/**
+ * The problem behind an error of the body parser. The error also holds the raw body and quotes it in its message:
+ * nothing of it goes any further.
+ */
+export function problemOfBodyError(error: unknown): ProblemError | null {
+  switch ((error as { type?: unknown } | null)?.type) {
+    case "entity.parse.failed":
+      return new ProblemError("malformed-json");
+    case "entity.too.large":
+      return new ProblemError("body-too-large");
+    case "encoding.unsupported":
+      return new ProblemError("unsupported-media-type", "Content-Encoding must be absent or identity.");
+    case "charset.unsupported":
+      return new ProblemError("unsupported-media-type");
+    case "request.aborted":
+    case "request.size.invalid":
+      return new ProblemError("interrupted-body");
+    default:
+      return null;
+  }
+}

@@ -1,0 +1,9 @@
+/** Where the numbers of examples come from when a program other than this one computed them. */
+export const SOURCES = {
+  stability:
+    "Computed at 75 digits by an independent program and checked by numerical integration (test/reference, stability of points).",
+  passbands:
+    "Computed at 50 digits by an independent program and checked by numerical integration (test/reference, passbands).",
+  rfOnly: "Computed at 50 digits by an independent program (test/reference, rods without DC).",
+  peakShapes: "Computed by an independent program, printed to 12 digits (test/reference, peak shapes).",
+} as const;
