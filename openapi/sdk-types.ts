@@ -9,7 +9,9 @@ export async function sdkSchema(document: unknown): Promise<string> {
 
 /** What the client needs of each operation at run time: method, path, and whether it takes a body. */
 export function sdkOperations(document: unknown): string {
-  const { paths } = document as { paths: Record<string, Record<string, { operationId?: string; requestBody?: unknown }>> };
+  const { paths } = document as {
+    paths: Record<string, Record<string, { operationId?: string; requestBody?: unknown }>>;
+  };
   const entries = Object.entries(paths).flatMap(([path, methods]) =>
     Object.entries(methods).flatMap(([method, { operationId, requestBody }]) =>
       operationId === undefined

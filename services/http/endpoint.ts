@@ -1,6 +1,7 @@
 import type { z } from "zod";
 import type { Rule } from "../contract/rule.ts";
 import type { ProblemCode } from "./problems.ts";
+import type { Tag } from "./tags.ts";
 
 /** What one request may cost. `GET /v1/about` shows these. */
 export interface Limits {
@@ -40,7 +41,7 @@ export interface Endpoint<Request extends RequestSchema, Answer extends z.ZodTyp
   readonly operationId: string;
   readonly method: "get" | "post";
   readonly path: `/${string}`;
-  readonly tag: string;
+  readonly tag: Tag;
   readonly summary: string;
   readonly description: string;
   /** null for an endpoint that takes nothing: its answer never changes while the service runs. */

@@ -9,7 +9,6 @@ export function createLogger(
     {
       level,
       base: null,
-      messageKey: "message",
       timestamp: stdTimeFunctions.isoTime,
       formatters: { level: (label) => ({ level: label }) },
     },

@@ -41,7 +41,7 @@ export const about = defineEndpoint({
         service: "rodset",
         version: VERSION,
         constants: "CODATA 2022",
-        limits: { body_kB: 512, itemsPerRequest: 1000, stepsPerSolution: 200, mathieuParameters: 12 },
+        limits: { body_kB: 512, itemsPerRequest: 1000, stepsPerSolution: 200, mathieuParameters: 100 },
         cautions: [...CAUTIONS],
       },
     },

@@ -1,0 +1,38 @@
+import { MAX_ACQUISITIONS } from "../../review/method.ts";
+import { reportHtml } from "../../review/report/report.ts";
+import { signOff as signOffOf } from "../../review/sign-off.ts";
+import { signOffErrors } from "../../review/sign-off-rules.ts";
+import { SignOffAnswer, SignOffRequest } from "../../review/sign-off-schema.ts";
+import { defineEndpoint } from "../endpoint.ts";
+import { SIGN_OFF_EXAMPLE } from "../examples/sign-off.ts";
+
+export const signOff = defineEndpoint({
+  operationId: "signOff",
+  method: "post",
+  path: "/v1/sign-off",
+  tag: "Sign-off",
+  summary: "Whether the mass-filter settings of a method can do what it claims, on paper",
+  description:
+    "Instrument, method and, where the laboratory has limits of its own, criteria; findings, settings and a verdict come back. Nothing about the rods need be known: a finding that lacks an input is indeterminate and names it. " +
+    "A pass means that every check that counts met its limit, and verdictStatement says what was not shown; it never means that a method works. As text/html the answer is a report to print, with room for a person's signature.",
+  request: SignOffRequest,
+  rules: [signOffErrors],
+  work: {
+    unit: "acquisitions",
+    of: ({ method }) => method.acquisition.length,
+    most: MAX_ACQUISITIONS,
+  },
+  answer: SignOffAnswer,
+  forms: { "text/html": reportHtml },
+  examples: {
+    "cell-at-100-volts": {
+      summary: "One transition; a fragment near the cutoff of a cell at 100 V, 1 MHz and 4.17 mm",
+      source:
+        "cutoff m/z 61.9 of a cell with r0 4.17 mm at 1 MHz and 100 V (worked example, recomputed from e/u of CODATA 2022)",
+      request: SIGN_OFF_EXAMPLE,
+      // The whole answer follows from the request; a test holds its figures against published and computed references.
+      answer: signOffOf(SIGN_OFF_EXAMPLE),
+    },
+  },
+  handler: signOffOf,
+});
