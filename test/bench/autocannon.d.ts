@@ -1,0 +1,16 @@
+declare module "autocannon" {
+  /** The part of its result that the benchmark reads. */
+  interface Result {
+    readonly requests: { readonly average: number };
+    readonly non2xx: number;
+    readonly errors: number;
+  }
+  export default function autocannon(options: {
+    readonly url: string;
+    readonly method: string;
+    readonly headers: Readonly<Record<string, string>>;
+    readonly body: string;
+    readonly connections: number;
+    readonly duration: number;
+  }): Promise<Result>;
+}
