@@ -5,6 +5,7 @@ import { passband } from "./endpoints/passband.ts";
 import { problems } from "./endpoints/problems.ts";
 import { rfOnly } from "./endpoints/rf-only.ts";
 import { setPoints } from "./endpoints/set-points.ts";
+import { signOff } from "./endpoints/sign-off.ts";
 import { signOffChecks } from "./endpoints/sign-off-checks.ts";
 import { stability } from "./endpoints/stability.ts";
 import { transit } from "./endpoints/transit.ts";
@@ -17,6 +18,7 @@ export const ENDPOINTS: readonly AnyEndpoint[] = [
   transit,
   passband,
   setPoints,
+  signOff,
   signOffChecks,
   about,
   problems,

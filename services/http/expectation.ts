@@ -10,8 +10,8 @@ export function expectationOf(schema: unknown): string {
     return `a text${range(schema.minLength, schema.maxLength, " characters")}`;
   }
   if (schema instanceof z.ZodArray) {
-    const { minimum, maximum } = schema._zod.bag as { minimum?: number; maximum?: number };
-    return `an array${range(minimum, maximum, " items")}`;
+    const { minItems, maxItems } = z.toJSONSchema(schema);
+    return `an array${range(minItems, maxItems, " items")}`;
   }
   if (schema instanceof z.ZodEnum) return oneOf(schema.options);
   if (schema instanceof z.ZodLiteral) return oneOf([...schema.values]);

@@ -7,8 +7,19 @@ const JSON_MEDIA_TYPE = /^application\/json(?:[ \t]*;[ \t]*charset=(?:utf-8|"utf
 export function jsonBody(limit_kB: number): RequestHandler[] {
   return [
     requireJson,
-    express.json({ type: () => true, inflate: false, limit: limit_kB * 1000, strict: true }),
-    requireBody,
+    express.json({
+      type: () => true,
+      inflate: false,
+      limit: limit_kB * 1000,
+      strict: true,
+      // The parser would take a body of no bytes for an empty object.
+      verify: (_request, _response, bytes) => refuseEmpty(bytes.length === 0),
+    }),
+    // Without Content-Length and Transfer-Encoding there is nothing to parse.
+    (request, _response, next) => {
+      refuseEmpty(request.body === undefined);
+      next();
+    },
   ];
 }
 
@@ -26,10 +37,9 @@ const requireJson: RequestHandler = (request, _response, next) => {
   next();
 };
 
-const requireBody: RequestHandler = (request, _response, next) => {
-  if (request.body === undefined) throw new ProblemError("malformed-json", "The body is empty.");
-  next();
-};
+function refuseEmpty(empty: boolean): void {
+  if (empty) throw new ProblemError("malformed-json", "The body is empty.");
+}
 
 /**
  * The problem behind an error of the body parser. The error also holds the raw body and quotes it in its message:

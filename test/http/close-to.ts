@@ -11,7 +11,7 @@ export function expectClose(actual: unknown, expected: unknown, relative: number
     typeof actual === "object" &&
     actual !== null
   ) {
-    expect(Object.keys(actual), path).toEqual(Object.keys(expected));
+    expect(Object.keys(actual).sort(), path).toEqual(Object.keys(expected).sort());
     for (const [name, value] of Object.entries(expected)) {
       expectClose((actual as Record<string, unknown>)[name], value, relative, `${path}/${name}`);
     }

@@ -6,6 +6,7 @@ export const OPERATIONS = {
   transit: { method: "POST", path: "/v1/transit", takesBody: true },
   passband: { method: "POST", path: "/v1/passband", takesBody: true },
   setPoints: { method: "POST", path: "/v1/set-points", takesBody: true },
+  signOff: { method: "POST", path: "/v1/sign-off", takesBody: true },
   signOffChecks: { method: "GET", path: "/v1/sign-off/checks", takesBody: false },
   about: { method: "GET", path: "/v1/about", takesBody: false },
   problems: { method: "GET", path: "/problems", takesBody: false },

@@ -120,6 +120,26 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/v1/sign-off": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Whether the mass-filter settings of a method can do what it claims, on paper
+         * @description Instrument, method and, where the laboratory has limits of its own, criteria; findings, settings and a verdict come back. Nothing about the rods need be known: a finding that lacks an input is indeterminate and names it. A pass means that every check that counts met its limit, and verdictStatement says what was not shown; it never means that a method works. As text/html the answer is a report to print, with room for a person's signature.
+         */
+        post: operations["signOff"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/v1/sign-off/checks": {
         parameters: {
             query?: never;
@@ -203,6 +223,15 @@ export interface components {
             /** @description What must be known before a result is used. */
             cautions: string[];
         };
+        Acquisition: components["schemas"]["Transition"] | components["schemas"]["SelectedIon"] | components["schemas"]["Scan"] | components["schemas"]["ProductScan"] | components["schemas"]["PrecursorScan"] | components["schemas"]["NeutralLossScan"];
+        /** @description The laboratory's limits of apex-margin. How far U/V stays below the apex of the stability region, where the window closes: the smallest margin of a stage. */
+        ApexMarginCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["LowerLimitByTolerance"];
+            caution?: components["schemas"]["LowerLimitByTolerance"];
+        };
         /** @description Gaussian beam at the entrance, centred on the axis. */
         Beam: components["schemas"]["BeamByAxes"] | components["schemas"]["BeamByEnergy"];
         BeamByAxes: {
@@ -220,6 +249,11 @@ export interface components {
             sigma_mm: number;
             /** @description Mean radial energy of both axes, in eV per charge. */
             meanRadialEnergy_eVPerCharge: number;
+        };
+        /** @description A closed interval; null is unbounded on that side. */
+        Bounds: {
+            min: number | null;
+            max: number | null;
         };
         Catalogue: {
             checks: components["schemas"]["CatalogueEntry"][];
@@ -242,6 +276,139 @@ export interface components {
             } | null;
             /** @description Where the default limits come from. */
             basis: string;
+        };
+        /** @description How the RF voltage of the collision cell is set. */
+        CellRf: components["schemas"]["CellRfFixed"] | components["schemas"]["CellRfCutoff"] | components["schemas"]["CellRfPrecursorQ"] | components["schemas"]["CellRfProductQ"] | components["schemas"]["CellRfTable"];
+        CellRfCutoff: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            mode: "cutoff";
+            /** @description The low-mass cutoff that was set. */
+            mz: number;
+        };
+        CellRfFixed: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            mode: "fixed";
+            rf: components["schemas"]["Rf"];
+        };
+        CellRfPrecursorQ: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            mode: "precursor-q";
+            /** @description q of the set precursor m/z in the cell. */
+            q: number;
+        };
+        CellRfProductQ: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            mode: "product-q";
+            /** @description q of the set product m/z in the cell. */
+            q: number;
+        };
+        CellRfTable: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            mode: "table";
+            /** @description Low-mass cutoff against set precursor m/z, linear between the points. */
+            points: components["schemas"]["CutoffPoint"][];
+        };
+        /** @description What this acquisition sets in the collision cell, in place of the instrument's. */
+        CellSetting: {
+            rf?: components["schemas"]["CellRf"];
+            /** @description Collision energy, in eV per charge; the sign follows the polarity. */
+            collisionEnergy_eVPerCharge?: number;
+        };
+        /** @description The laboratory's limits of cell-well-depth. Effective potential of the collision cell at 0.8 of its field radius over the largest radial energy to be confined. */
+        CellWellDepthCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["LowerLimit"];
+            caution?: components["schemas"]["LowerLimit"];
+        };
+        CollisionCellStage: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            name: string;
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            role: "collision-cell";
+            rf: components["schemas"]["CellRf"];
+            rodSet?: components["schemas"]["RodSet"];
+            residence?: components["schemas"]["Residence"];
+            supply?: components["schemas"]["Supply"];
+            gas?: {
+                /** @description A molecular formula, such as C33H40N2O9. */
+                formula: string;
+                /** @description Gas pressure in Pa. */
+                pressure_Pa: number;
+            };
+            /** @description Largest radial energy to be confined, in eV per charge. */
+            maxRadialEnergy_eVPerCharge?: number;
+            /** @description Time in which ions of the last transition leave, in ms. */
+            clearing_ms?: number;
+        };
+        Compound: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            id: string;
+            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            name?: string;
+            /** @description A molecular formula, such as C33H40N2O9. */
+            formula?: string;
+            internalStandard?: boolean;
+            range?: {
+                /** @description Lower end of the working range, in the unit of amount. */
+                low: number;
+                /** @description Upper end of the working range, in the unit of amount. */
+                high: number;
+            };
+            /** @description Amount of an internal standard, in the unit of the range. */
+            amount?: number;
+            /** @description Fraction of the labelled compound that is labelled. */
+            isotopicPurity?: number;
+        };
+        /** @description The laboratory's own limits, in place of the defaults. */
+        Criteria: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            id: string;
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            revision: string;
+            checks: components["schemas"]["CriteriaChecks"];
+        };
+        CriteriaChecks: {
+            "set-mz"?: components["schemas"]["SetMzCriterion"];
+            "edge-margin"?: components["schemas"]["EdgeMarginCriterion"];
+            "window-width"?: components["schemas"]["WindowWidthCriterion"];
+            "apex-margin"?: components["schemas"]["ApexMarginCriterion"];
+            "supply-headroom"?: components["schemas"]["SupplyHeadroomCriterion"];
+            "voltage-convention"?: components["schemas"]["VoltageConventionCriterion"];
+            "rf-cycles"?: components["schemas"]["RfCyclesCriterion"];
+            "scan-shift"?: components["schemas"]["ScanShiftCriterion"];
+            "product-above-cutoff"?: components["schemas"]["ProductAboveCutoffCriterion"];
+            "precursor-q-in-cell"?: components["schemas"]["PrecursorQInCellCriterion"];
+            "cell-well-depth"?: components["schemas"]["CellWellDepthCriterion"];
+            "dwell-time"?: components["schemas"]["DwellTimeCriterion"];
+            "pause-time"?: components["schemas"]["PauseTimeCriterion"];
+            "points-across-peak"?: components["schemas"]["PointsAcrossPeakCriterion"];
+            "peak-tails"?: components["schemas"]["PeakTailsCriterion"];
+        };
+        CutoffPoint: {
+            /** @description Set precursor m/z. */
+            mz: number;
+            /** @description Mass-to-charge ratio m/z of the ion, dimensionless. */
+            cutoffMz: number;
         };
         /** @description The DC between the rod pairs, or both pairs against ground: the second gives U and the rod offset, which must not be taken for U. */
         Dc: components["schemas"]["DcDifference"] | components["schemas"]["DcPairs"];
@@ -266,6 +433,27 @@ export interface components {
             /** @description Absent means RF-only. */
             dc?: components["schemas"]["Dc"];
         };
+        DrivePoint: {
+            /** @description Mass-to-charge ratio m/z of the ion, dimensionless. */
+            mz: number;
+            drive: components["schemas"]["Drive"];
+        };
+        /** @description The laboratory's limits of dwell-time. Shortest dwell time that an acquisition is given, or the counts in it where a count rate is stated. */
+        DwellTimeCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["LowerLimitOfDwell"];
+            caution?: components["schemas"]["LowerLimitOfDwell"];
+        };
+        /** @description The laboratory's limits of edge-margin. Distance in m/z from the ion to the nearer edge of its window, after the drift allowed between two tunes. */
+        EdgeMarginCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["LowerLimitByWidth"];
+            caution?: components["schemas"]["LowerLimitByWidth"];
+        };
         /** @description One thing that is wrong with a request, and where. */
         ErrorOfMember: {
             /** @description JSON Pointer (RFC 6901) to the member; empty for the body. */
@@ -275,6 +463,11 @@ export interface components {
             /** @description What was found and what is expected, for a person. */
             detail: string;
         };
+        /**
+         * @description How a finding knows: from observed peaks, from the physics of stated voltages and rods, or only from a claim. What follows from a claim proves nothing.
+         * @enum {string}
+         */
+        Evidence: "measured" | "computed" | "stated";
         FindDrive: {
             /**
              * @description discriminator enum property added by openapi-typescript
@@ -346,6 +539,30 @@ export interface components {
             /** @description 1 to 1000 ions; the results come back in the same order. */
             ions: components["schemas"]["Ion"][];
         };
+        /** @description One judged quantity of one subject. */
+        Finding: {
+            check: string;
+            quantity: string;
+            subject: components["schemas"]["Subject"];
+            outcome: components["schemas"]["Outcome"];
+            /** @description Whether this finding counts in the verdict. */
+            required: boolean;
+            /** @description stated where nothing could be judged. */
+            evidence: components["schemas"]["Evidence"];
+            value: number | null;
+            /** @description UCUM unit of value and bounds; 1 for m/z and ratios. */
+            unit: string;
+            pass: components["schemas"]["Bounds"];
+            caution: components["schemas"]["Bounds"];
+            /** @description Signed distance of value to the nearer pass bound, negative outside. */
+            margin: number | null;
+            passesIf: components["schemas"]["PassesIf"] | null;
+            /** @description JSON Pointers of the inputs that a judgement lacks. */
+            missing: string[];
+            statement: string;
+            /** @description Where the limits come from. */
+            basis: string;
+        };
         FoundDrive: {
             /**
              * @description discriminator enum property added by openapi-typescript
@@ -413,6 +630,17 @@ export interface components {
                 q: number;
             }[];
         };
+        /** @description What is known of the instrument. Nothing about the rods need be known. */
+        Instrument: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            id: string;
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            revision: string;
+            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            label?: string;
+            /** @description The rod sets, in the order in which ions meet them. */
+            stages: components["schemas"]["Stage"][];
+        };
         /** @description An ion, by its m/z or by formula and adduct. */
         Ion: components["schemas"]["IonByMz"] | components["schemas"]["IonByFormula"];
         IonByFormula: {
@@ -433,12 +661,223 @@ export interface components {
             /** @description A short text for people, 1 to 200 characters, no control characters. */
             label?: string;
         };
+        IonGuideStage: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            name: string;
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            role: "ion-guide";
+            rf?: components["schemas"]["Rf"];
+            rodSet?: components["schemas"]["RodSet"];
+            residence?: components["schemas"]["Residence"];
+            supply?: components["schemas"]["Supply"];
+        };
+        /** @description Refused: a linear formula does not hold in an ion trap. */
+        IonTrapStage: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            name: string;
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            role: "ion-trap";
+        } & {
+            [key: string]: unknown;
+        };
         /** @description Parts of a limit, as criteria state them: min, max, minOfWidth and the like. */
         LimitShown: {
             [key: string]: number;
         };
+        LowerLimit: {
+            /** @description Smallest value, in the unit of the finding. */
+            min: number;
+        };
+        LowerLimitByTolerance: {
+            /** @description Smallest value, in the unit of the finding. */
+            min: number;
+            /** @description Smallest value as a multiple of the stated tolerance. */
+            minOfTolerance?: number;
+        };
+        LowerLimitByWidth: {
+            /** @description Smallest value in m/z. */
+            min: number;
+            /** @description Smallest value as a fraction of the window's width. */
+            minOfWidth?: number;
+        };
+        LowerLimitOfDwell: {
+            /** @description Shortest dwell time in ms. */
+            min: number;
+            /** @description Fewest counts in one dwell time. */
+            minCounts?: number;
+        };
+        MassFilterStage: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            name: string;
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            role: "mass-filter";
+            /**
+             * @description filtering when absent; rf-only when the rods pass ions without selecting them.
+             * @enum {string}
+             */
+            mode?: "filtering" | "rf-only";
+            /** @description Required unless mode is rf-only. */
+            operatingPoint?: components["schemas"]["OperatingPoint"];
+            /** @description The RF voltage of a mass filter run as rf-only. */
+            rf?: components["schemas"]["Rf"];
+            rodSet?: components["schemas"]["RodSet"];
+            residence?: components["schemas"]["Residence"];
+            beam?: components["schemas"]["Beam"];
+            supply?: components["schemas"]["Supply"];
+            /** @description The m/z range that the maker guarantees. */
+            rated?: {
+                /** @description Mass-to-charge ratio m/z of the ion, dimensionless. */
+                mzLow: number;
+                /** @description Mass-to-charge ratio m/z of the ion, dimensionless. */
+                mzHigh: number;
+            };
+            tolerances?: components["schemas"]["Tolerances"];
+            /** @description Time the voltages need to settle after a step, in ms. */
+            settle_ms?: number;
+        };
         MathieuParametersAnswer: components["schemas"]["FoundParameters"] | components["schemas"]["FoundDrive"] | components["schemas"]["FoundMz"] | components["schemas"]["FoundFrequency"] | components["schemas"]["FoundFieldRadius"];
         MathieuParametersRequest: components["schemas"]["FindParameters"] | components["schemas"]["FindDrive"] | components["schemas"]["FindMz"] | components["schemas"]["FindFrequency"] | components["schemas"]["FindFieldRadius"];
+        MeasuredPeak: {
+            /** @description The m/z that was set. */
+            setMz: number;
+            /** @description The m/z at which the peak was observed. */
+            observedMz: number;
+            width: components["schemas"]["Width"];
+        };
+        /** @description What the method acquires. */
+        Method: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            id: string;
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            revision: string;
+            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            label?: string;
+            polarity: components["schemas"]["Polarity"];
+            timing: components["schemas"]["Timing"];
+            chromatographicPeakWidth?: {
+                /** @description Width of the chromatographic peak in s. */
+                value_s: number;
+                /** @enum {string} */
+                at: "base" | "half-height";
+            };
+            compounds?: components["schemas"]["Compound"][];
+            acquisition: components["schemas"]["Acquisition"][];
+        };
+        Neighbour: {
+            ion: components["schemas"]["Ion"];
+            /** @description Response of the neighbour as a fraction of the target's. */
+            fractionOfTarget: number;
+            attenuation?: {
+                /** @description What is left of the neighbour, as a fraction. */
+                factor: number;
+                /** @description A text for people, 1 to 2,000 characters, no control characters. */
+                evidence: string;
+            };
+        };
+        /** @description Both filters scan at a fixed distance; mzFrom and mzTo are the precursor's. */
+        NeutralLossScan: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            id: string;
+            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            label?: string;
+            /** @description id of a compound of the method. */
+            compound?: string;
+            /** @description The method's polarity when absent. */
+            polarity?: components["schemas"]["Polarity"];
+            /** @description Time between the step to this acquisition and its dwell, in ms. */
+            pause_ms?: number;
+            /** @description When it is acquired; always when absent. */
+            retention?: components["schemas"]["Retention"];
+            /** @description m/z at which the scan starts. */
+            mzFrom: number;
+            /** @description m/z at which the scan ends; above mzFrom. */
+            mzTo: number;
+            /** @description Scan rate in m/z per second. */
+            rate_mzPerS: number;
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            kind: "neutral-loss-scan";
+            /** @description Distance of both filters in m/z: mass of the loss over the charge number. */
+            lossMz: number;
+            precursorWidth?: components["schemas"]["Width"];
+            productWidth?: components["schemas"]["Width"];
+            cell?: components["schemas"]["CellSetting"];
+        };
+        /** @description What could not be judged and does not count in the verdict. */
+        NotShown: {
+            check: string;
+            quantity: string;
+            missing: string[];
+            /** @description How many findings lack this. */
+            findings: number;
+            statement: string;
+        };
+        /** @description How the working point of a mass filter is known. */
+        OperatingPoint: components["schemas"]["OperatingPointByPeaks"] | components["schemas"]["OperatingPointByDrives"] | components["schemas"]["OperatingPointByLaw"] | components["schemas"]["OperatingPointStated"];
+        /** @description Voltages read from the supply at set m/z. */
+        OperatingPointByDrives: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            by: "drives";
+            points: components["schemas"]["DrivePoint"][];
+        };
+        /** @description The straight line that the supply follows. */
+        OperatingPointByLaw: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            by: "drive-law";
+            /** @description RF volts per unit of set m/z, in the convention stated beside them. */
+            rfPerMz: components["schemas"]["Rf"];
+            /** @description U/V of the straight line, U and V between the same points and V zero-to-peak, dimensionless. */
+            dcSlope: number;
+            /** @description What the straight line takes off: U = dcSlope V - dcOffset_V, between the points that rfPerMz names. */
+            dcOffset_V: number;
+        };
+        /** @description The peaks of a tune report. */
+        OperatingPointByPeaks: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            by: "measured-peaks";
+            peaks: components["schemas"]["MeasuredPeak"][];
+        };
+        /** @description Only claimed: what follows from it proves nothing. */
+        OperatingPointStated: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            by: "stated";
+            width: components["schemas"]["Width"];
+        };
+        /**
+         * @description indeterminate names what is missing and never counts as a pass.
+         * @enum {string}
+         */
+        Outcome: "pass" | "caution" | "fail" | "indeterminate" | "not-applicable";
+        OutcomeCounts: {
+            pass: number;
+            caution: number;
+            fail: number;
+            indeterminate: number;
+            "not-applicable": number;
+        };
         /** @description The m/z that are stable in both planes in an ideal field after any number of RF cycles. */
         Passband: {
             region: components["schemas"]["RegionName"];
@@ -494,6 +933,29 @@ export interface components {
             width: components["schemas"]["Width"];
         };
         PassbandRequest: components["schemas"]["PassbandOfDrive"] | components["schemas"]["PassbandOfWidth"];
+        /** @description The interval of one input in which the finding would pass, all else unchanged. */
+        PassesIf: {
+            /** @description JSON Pointer of the input that would have to change. */
+            input: string;
+            min: number | null;
+            max: number | null;
+            /** @description UCUM unit of the bounds, or of the input. */
+            unit: string;
+        };
+        /** @description The laboratory's limits of pause-time. Pause before an acquisition over the time that the voltages need to settle and the ion to fly through all stages, and the cell to clear where the acquisition before it has the same product. */
+        PauseTimeCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["LowerLimit"];
+            caution?: components["schemas"]["LowerLimit"];
+        };
+        /** @description The laboratory's limits of peak-tails. Nothing: it stands here so that nobody takes its absence for a result. */
+        PeakTailsCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+        };
         /** @description Motion in one plane; all null outside the computed domain. */
         PlaneStability: {
             stable: boolean | null;
@@ -503,6 +965,56 @@ export interface components {
             characteristicExponent: number | null;
             /** @description Half the trace over one RF period, cos πβ where the motion is stable. */
             halfTrace: number | null;
+        };
+        /** @description The laboratory's limits of points-across-peak. Base width of the chromatographic peak over the time of one round at the busiest moment of the schedule. */
+        PointsAcrossPeakCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["LowerLimit"];
+            caution?: components["schemas"]["LowerLimit"];
+        };
+        /** @enum {string} */
+        Polarity: "positive" | "negative";
+        /** @description The laboratory's limits of precursor-q-in-cell. Mathieu q of the precursor ion in the RF-only collision cell. */
+        PrecursorQInCellCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["RangeLimit"];
+            caution?: components["schemas"]["RangeLimit"];
+        };
+        /** @description The filter before the cell scans, the one behind it holds the product. */
+        PrecursorScan: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            id: string;
+            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            label?: string;
+            /** @description id of a compound of the method. */
+            compound?: string;
+            /** @description The method's polarity when absent. */
+            polarity?: components["schemas"]["Polarity"];
+            /** @description Time between the step to this acquisition and its dwell, in ms. */
+            pause_ms?: number;
+            /** @description When it is acquired; always when absent. */
+            retention?: components["schemas"]["Retention"];
+            /** @description m/z at which the scan starts. */
+            mzFrom: number;
+            /** @description m/z at which the scan ends; above mzFrom. */
+            mzTo: number;
+            /** @description Scan rate in m/z per second. */
+            rate_mzPerS: number;
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            kind: "precursor-scan";
+            product: components["schemas"]["Ion"];
+            /** @description Mass-to-charge ratio m/z of the ion, dimensionless. */
+            setProductMz?: number;
+            productWidth?: components["schemas"]["Width"];
+            precursorWidth?: components["schemas"]["Width"];
+            cell?: components["schemas"]["CellSetting"];
         };
         /** @description Problem details (RFC 9457). */
         Problem: {
@@ -541,6 +1053,57 @@ export interface components {
             when: string;
             remedy: string;
         };
+        /** @description The laboratory's limits of product-above-cutoff. m/z of the product ion over the low-mass cutoff of the RF-only collision cell as the acquisition sets it, and of the lightest ion over the cutoff of each rod set that only passes ions. */
+        ProductAboveCutoffCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["LowerLimit"];
+            caution?: components["schemas"]["LowerLimit"];
+        };
+        ProductByNeutralLoss: {
+            /** @description A molecular formula, such as C33H40N2O9. */
+            neutralLoss: string;
+        };
+        /** @description The filter before the cell holds the precursor, the one behind it scans. */
+        ProductScan: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            id: string;
+            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            label?: string;
+            /** @description id of a compound of the method. */
+            compound?: string;
+            /** @description The method's polarity when absent. */
+            polarity?: components["schemas"]["Polarity"];
+            /** @description Time between the step to this acquisition and its dwell, in ms. */
+            pause_ms?: number;
+            /** @description When it is acquired; always when absent. */
+            retention?: components["schemas"]["Retention"];
+            /** @description m/z at which the scan starts. */
+            mzFrom: number;
+            /** @description m/z at which the scan ends; above mzFrom. */
+            mzTo: number;
+            /** @description Scan rate in m/z per second. */
+            rate_mzPerS: number;
+            precursor: components["schemas"]["Ion"];
+            /** @description m/z set for the precursor; its computed m/z when absent. */
+            setPrecursorMz?: number;
+            /** @description Window that the method claims for the precursor. */
+            precursorWidth?: components["schemas"]["Width"];
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            kind: "product-scan";
+            productWidth?: components["schemas"]["Width"];
+            cell?: components["schemas"]["CellSetting"];
+        };
+        RangeLimit: {
+            /** @description Largest value, in the unit of the finding. */
+            max: number;
+            /** @description Smallest value, in the unit of the finding. */
+            min?: number;
+        };
         RectangularWaveform: {
             /**
              * @description discriminator enum property added by openapi-typescript
@@ -574,6 +1137,12 @@ export interface components {
             /** @description Time in the field in us, the same for every ion. */
             flightTime_us: number;
         };
+        Retention: {
+            /** @description Start of the retention window in min. */
+            start_min: number;
+            /** @description End of the retention window in min. */
+            end_min: number;
+        };
         /** @description An RF voltage with the convention in which it is stated. */
         Rf: {
             /** @description RF voltage in V, read as the members beside it say. */
@@ -588,6 +1157,14 @@ export interface components {
              * @enum {string}
              */
             between: "pole-and-ground" | "pole-and-pole";
+        };
+        /** @description The laboratory's limits of rf-cycles. RF cycles N in the field, squared, over the resolution R of the window: the fewest that the method meets in a stage. */
+        RfCyclesCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["LowerLimit"];
+            caution?: components["schemas"]["LowerLimit"];
         };
         RfOnlyAnswer: {
             /** @description m/z below which ions are lost; null without RF and above two pole pairs. */
@@ -636,6 +1213,84 @@ export interface components {
             polePairs?: number;
             waveform?: components["schemas"]["Waveform"];
         };
+        Scan: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            id: string;
+            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            label?: string;
+            /** @description id of a compound of the method. */
+            compound?: string;
+            /** @description The method's polarity when absent. */
+            polarity?: components["schemas"]["Polarity"];
+            /** @description Time between the step to this acquisition and its dwell, in ms. */
+            pause_ms?: number;
+            /** @description When it is acquired; always when absent. */
+            retention?: components["schemas"]["Retention"];
+            /** @description m/z at which the scan starts. */
+            mzFrom: number;
+            /** @description m/z at which the scan ends; above mzFrom. */
+            mzTo: number;
+            /** @description Scan rate in m/z per second. */
+            rate_mzPerS: number;
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            kind: "scan";
+            /** @description Name of the mass filter that scans. */
+            stage: string;
+            /** @description Window that the method claims. */
+            width?: components["schemas"]["Width"];
+        };
+        /** @description The laboratory's limits of scan-shift. How far the window of a scan moves while an ion is in the field, over the window's width. */
+        ScanShiftCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["UpperLimit"];
+            caution?: components["schemas"]["UpperLimit"];
+        };
+        SelectedIon: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            id: string;
+            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            label?: string;
+            /** @description id of a compound of the method. */
+            compound?: string;
+            /** @description The method's polarity when absent. */
+            polarity?: components["schemas"]["Polarity"];
+            /** @description Time between the step to this acquisition and its dwell, in ms. */
+            pause_ms?: number;
+            /** @description When it is acquired; always when absent. */
+            retention?: components["schemas"]["Retention"];
+            /** @enum {string} */
+            use?: "quantifier" | "qualifier";
+            /** @description Dwell time in ms. */
+            dwell_ms?: number;
+            /** @description Expected count rate at the lower limit, in counts per second. */
+            countRate_perS?: number;
+            neighbours?: components["schemas"]["Neighbour"][];
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            kind: "selected-ion";
+            /** @description Name of the mass filter that selects the ion. */
+            stage: string;
+            ion: components["schemas"]["Ion"];
+            /** @description m/z set for the ion; its computed m/z when absent. */
+            setMz?: number;
+            /** @description Window that the method claims. */
+            width?: components["schemas"]["Width"];
+        };
+        /** @description The laboratory's limits of set-mz. Distance of the set m/z from the m/z of the ion. */
+        SetMzCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["UpperLimitByWidth"];
+            caution?: components["schemas"]["UpperLimitByWidth"];
+        };
         SetPoint: {
             mz: number;
             /** @description Calculated volts in the convention of the request; not settings to apply. */
@@ -666,6 +1321,51 @@ export interface components {
             beam?: components["schemas"]["Beam"];
             /** @description 1 to 1000 targets; the results come back in the same order. */
             targets: components["schemas"]["Target"][];
+        };
+        /** @description One ion in one stage, as the method sets it. */
+        Setting: {
+            /** @description JSON Pointer of the ion or of the end of a scan. */
+            pointer: string;
+            acquisition: string;
+            stage: string;
+            ion: string;
+            mz: number;
+            setMz: number;
+            /** @description What the filter lets through, null where nothing passes or it is not known. */
+            window: {
+                mzLow: number;
+                mzHigh: number;
+                /**
+                 * @description At which height the width is taken: between the stability edges, at half or at a tenth of the peak's height. No default: the three differ.
+                 * @enum {string}
+                 */
+                at: "edges" | "half-height" | "tenth-height";
+                evidence: components["schemas"]["Evidence"];
+            } | null;
+            /** @description Calculated volts, in the convention of the request; not settings to apply. */
+            drive: components["schemas"]["Drive"] | null;
+            /** @description Low-mass cutoff of the collision cell for this ion. */
+            cutoffMz: number | null;
+        };
+        SignOffAnswer: {
+            verdict: components["schemas"]["Verdict"];
+            verdictStatement: string;
+            outcomeCounts: components["schemas"]["OutcomeCounts"];
+            findings: components["schemas"]["Finding"][];
+            settings: components["schemas"]["Setting"][];
+            notShown: components["schemas"]["NotShown"][];
+            waivers: components["schemas"]["WaivedCheck"][];
+            /** @description The laboratory's criteria, null where the defaults were used. */
+            criteria: {
+                id: string;
+                revision: string;
+            } | null;
+            cautions: string[];
+        };
+        SignOffRequest: {
+            instrument: components["schemas"]["Instrument"];
+            method: components["schemas"]["Method"];
+            criteria?: components["schemas"]["Criteria"];
         };
         SinusoidWaveform: {
             /**
@@ -722,10 +1422,72 @@ export interface components {
             x: components["schemas"]["PlaneStability"];
             y: components["schemas"]["PlaneStability"];
         };
+        Stage: components["schemas"]["MassFilterStage"] | components["schemas"]["CollisionCellStage"] | components["schemas"]["IonGuideStage"] | components["schemas"]["IonTrapStage"];
+        /** @description What a finding is about. */
+        Subject: {
+            /** @description JSON Pointer into the request. */
+            pointer: string;
+            acquisition?: string;
+            stage?: string;
+            /** @description Label of the ion, or its m/z. */
+            ion?: string;
+        };
+        /** @description What the supply can reach. */
+        Supply: {
+            /** @description Largest RF voltage of the supply. */
+            rfMax?: components["schemas"]["Rf"];
+            /** @description Largest DC voltage of the supply. */
+            dcMax?: components["schemas"]["Dc"];
+        };
+        /** @description The laboratory's limits of supply-headroom. What is left of the supply's largest voltage at the heaviest demand of the method, or of the rated m/z range. */
+        SupplyHeadroomCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["LowerLimit"];
+            caution?: components["schemas"]["LowerLimit"];
+        };
         /** @description The ion on which a passband is centred, and how wide it is. */
         Target: {
             ion: components["schemas"]["Ion"];
             width: components["schemas"]["Width"];
+        };
+        Timing: components["schemas"]["TimingByDwell"] | components["schemas"]["TimingByCycle"];
+        TimingByCycle: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            mode: "cycle";
+            /** @description Wanted cycle time in ms, shared among the acquisitions of the moment. */
+            cycle_ms: number;
+            /** @description Shortest dwell time that is given, in ms. */
+            dwellMin_ms: number;
+            /** @description Longest dwell time that is given, in ms. */
+            dwellMax_ms: number;
+        };
+        /** @description Every acquisition states its dwell time. */
+        TimingByDwell: {
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            mode: "dwell";
+        };
+        /** @description What may move between two tunes. */
+        Tolerances: {
+            /** @description Relative tolerance, plus or minus, in ppm. */
+            fieldRadius_ppm?: number;
+            /** @description Relative tolerance, plus or minus, in ppm. */
+            frequency_ppm?: number;
+            /** @description U and V moving together, plus or minus, in ppm. */
+            amplitude_ppm?: number;
+            /** @description U against V, plus or minus, in ppm. */
+            ratio_ppm?: number;
+            /** @description Shift of the window between two tunes, plus or minus, in m/z. */
+            mzDriftBetweenTunes?: number;
+            /** @description Uncertainty of the m/z calibration, plus or minus, in m/z. */
+            mzCalibration?: number;
         };
         TransitAnswer: {
             results: components["schemas"]["TransitResult"][];
@@ -748,6 +1510,69 @@ export interface components {
                 resolution: number;
             }[];
         };
+        Transition: {
+            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            id: string;
+            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            label?: string;
+            /** @description id of a compound of the method. */
+            compound?: string;
+            /** @description The method's polarity when absent. */
+            polarity?: components["schemas"]["Polarity"];
+            /** @description Time between the step to this acquisition and its dwell, in ms. */
+            pause_ms?: number;
+            /** @description When it is acquired; always when absent. */
+            retention?: components["schemas"]["Retention"];
+            /** @enum {string} */
+            use?: "quantifier" | "qualifier";
+            /** @description Dwell time in ms. */
+            dwell_ms?: number;
+            /** @description Expected count rate at the lower limit, in counts per second. */
+            countRate_perS?: number;
+            neighbours?: components["schemas"]["Neighbour"][];
+            precursor: components["schemas"]["Ion"];
+            /** @description m/z set for the precursor; its computed m/z when absent. */
+            setPrecursorMz?: number;
+            /** @description Window that the method claims for the precursor. */
+            precursorWidth?: components["schemas"]["Width"];
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            kind: "transition";
+            product: components["schemas"]["Ion"] | components["schemas"]["ProductByNeutralLoss"];
+            /** @description m/z set for the product; its computed m/z when absent. */
+            setProductMz?: number;
+            /** @description Window that the method claims for the product. */
+            productWidth?: components["schemas"]["Width"];
+            cell?: components["schemas"]["CellSetting"];
+        };
+        TwoSidedLimit: {
+            /** @description Smallest value, in the unit of the finding. */
+            min: number;
+            /** @description Largest value, in the unit of the finding. */
+            max: number;
+        };
+        UpperLimit: {
+            /** @description Largest value, in the unit of the finding. */
+            max: number;
+        };
+        UpperLimitByWidth: components["schemas"]["UpperLimitInMz"] | components["schemas"]["UpperLimitOfWidth"];
+        UpperLimitInMz: {
+            /** @description Largest value in m/z. */
+            max: number;
+            /** @description Largest value as a fraction of the window's width. */
+            maxOfWidth?: number;
+        };
+        UpperLimitOfWidth: {
+            /** @description Largest value as a fraction of the window's width. */
+            maxOfWidth: number;
+        };
+        /**
+         * @description The worst outcome of the findings that count: fail, indeterminate, caution, pass.
+         * @enum {string}
+         */
+        Verdict: "pass" | "caution" | "fail" | "indeterminate";
         /** @description How the voltages of the answer are to be read. */
         VoltageConvention: {
             rf: {
@@ -770,6 +1595,28 @@ export interface components {
                 between: "pole-and-ground" | "pole-and-pole";
             };
         };
+        /** @description The laboratory's limits of voltage-convention. m/z that the stated RF voltage puts at the apex of the stability region, over the m/z it is stated for. */
+        VoltageConventionCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["TwoSidedLimit"];
+            caution?: components["schemas"]["TwoSidedLimit"];
+        };
+        /** @description A check that the laboratory's criteria take out of the verdict. */
+        WaivedCheck: {
+            check: string;
+            worstOutcome: ("pass" | "caution" | "fail" | "indeterminate") | null;
+            reason: string;
+            reference: string;
+        };
+        /** @description The check no longer counts in the verdict; its findings keep their outcome and the waiver is listed. */
+        Waiver: {
+            /** @description A text for people, 1 to 2,000 characters, no control characters. */
+            reason: string;
+            /** @description Where the laboratory's decision is kept. */
+            reference: string;
+        };
         /** @description Shape of the RF voltage; a sinusoid when absent. */
         Waveform: components["schemas"]["SinusoidWaveform"] | components["schemas"]["RectangularWaveform"];
         /** @description Width of a mass window, with the height at which it is taken. */
@@ -783,6 +1630,14 @@ export interface components {
              * @enum {string}
              */
             at: "edges" | "half-height" | "tenth-height";
+        };
+        /** @description The laboratory's limits of window-width. Difference in m/z between the width that is observed or computed and the width that the method claims. */
+        WindowWidthCriterion: {
+            /** @description Whether the check counts in the verdict, also where it is indeterminate. */
+            required?: boolean;
+            waiver?: components["schemas"]["Waiver"];
+            pass?: components["schemas"]["UpperLimit"];
+            caution?: components["schemas"]["UpperLimit"];
         };
     };
     responses: never;
@@ -1284,6 +2139,101 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["SetPointsAnswer"];
+                };
+            };
+            /**
+             * @description `malformed-json`: The body is empty, is not well-formed JSON in UTF-8, or its top level is no object.
+             *
+             *     `interrupted-body`: The connection ended, or fewer bytes came than Content-Length announced.
+             */
+            400: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `body-too-large`: The body is larger than the limit that GET /v1/about shows. */
+            413: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `unsupported-media-type`: Content-Type is not application/json (with or without charset=utf-8), or the body is compressed. */
+            415: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /**
+             * @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where.
+             *
+             *     `too-much-work`: Each part is valid, but together they cost more than one request may.
+             */
+            422: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    signOff: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** @description Whether the mass-filter settings of a method can do what it claims, on paper */
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SignOffRequest"];
+            };
+        };
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SignOffAnswer"];
+                    "text/html": string;
                 };
             };
             /**

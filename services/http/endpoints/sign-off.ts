@@ -1,9 +1,11 @@
 import { MAX_ACQUISITIONS } from "../../review/method.ts";
+import { recordedSignOff } from "../../review/record/record.ts";
 import { reportHtml } from "../../review/report/report.ts";
-import { signOff as signOffOf } from "../../review/sign-off.ts";
+import { SignOffAnswer } from "../../review/sign-off-answer.ts";
 import { signOffErrors } from "../../review/sign-off-rules.ts";
-import { SignOffAnswer, SignOffRequest } from "../../review/sign-off-schema.ts";
+import { SignOffRequest } from "../../review/sign-off-schema.ts";
 import { defineEndpoint } from "../endpoint.ts";
+import { ENGINE } from "../engine.ts";
 import { SIGN_OFF_EXAMPLE } from "../examples/sign-off.ts";
 
 export const signOff = defineEndpoint({
@@ -31,8 +33,8 @@ export const signOff = defineEndpoint({
         "cutoff m/z 61.9 of a cell with r0 4.17 mm at 1 MHz and 100 V (worked example, recomputed from e/u of CODATA 2022)",
       request: SIGN_OFF_EXAMPLE,
       // The whole answer follows from the request; a test holds its figures against published and computed references.
-      answer: signOffOf(SIGN_OFF_EXAMPLE),
+      answer: recordedSignOff(SIGN_OFF_EXAMPLE, ENGINE),
     },
   },
-  handler: signOffOf,
+  handler: (request) => recordedSignOff(request, ENGINE),
 });
