@@ -15,6 +15,7 @@ export const Verdict = z.enum(["pass", "caution", "fail", "indeterminate"]).meta
   id: "Verdict",
   description: "The worst outcome of the findings that count: fail, indeterminate, caution, pass.",
 });
+export type Verdict = z.output<typeof Verdict>;
 
 const Setting = z
   .strictObject({
@@ -63,7 +64,7 @@ const WaivedCheck = z
   });
 export type WaivedCheck = z.output<typeof WaivedCheck>;
 
-export const SignOffAnswer = z
+export const SignOffResult = z
   .strictObject({
     verdict: Verdict,
     verdictStatement: z.string(),
@@ -80,11 +81,6 @@ export const SignOffAnswer = z
     settings: z.array(Setting),
     notShown: z.array(NotShown),
     waivers: z.array(WaivedCheck),
-    criteria: z
-      .strictObject({ id: z.string(), revision: z.string() })
-      .nullable()
-      .meta({ description: "The laboratory's criteria, null where the defaults were used." }),
-    cautions: z.array(z.string()),
   })
-  .meta({ id: "SignOffAnswer" });
-export type SignOffAnswer = z.output<typeof SignOffAnswer>;
+  .meta({ id: "SignOffResult", description: "What a sign-off found: the part that goes on record." });
+export type SignOffResult = z.output<typeof SignOffResult>;

@@ -5,11 +5,12 @@ import { type Finding, type Outcome, worstOutcome } from "./finding.ts";
 import { judge } from "./observation.ts";
 import { resolveMethod } from "./resolve/resolve.ts";
 import { settingsOf } from "./settings.ts";
-import type { NotShown, SignOffAnswer, SignOffRequest, WaivedCheck } from "./sign-off-schema.ts";
+import type { Assessment } from "./sign-off-answer.ts";
+import type { NotShown, SignOffRequest, WaivedCheck } from "./sign-off-schema.ts";
 import { listed } from "./statement.ts";
 
 /** Instrument, method and criteria in; findings and verdict out. Pure and deterministic. */
-export function signOff({ instrument, method, criteria }: SignOffRequest): SignOffAnswer {
+export function signOff({ instrument, method, criteria }: SignOffRequest): Assessment {
   const resolved = resolveMethod(instrument, method);
   const findings: Finding[] = [];
   const waivers: WaivedCheck[] = [];
@@ -42,11 +43,11 @@ export function signOff({ instrument, method, criteria }: SignOffRequest): SignO
   };
 }
 
-function criteriaNamed(criteria: Criteria | undefined): SignOffAnswer["criteria"] {
+function criteriaNamed(criteria: Criteria | undefined): Assessment["criteria"] {
   return criteria === undefined ? null : { id: criteria.id, revision: criteria.revision };
 }
 
-function countOutcomes(findings: readonly Finding[]): SignOffAnswer["outcomeCounts"] {
+function countOutcomes(findings: readonly Finding[]): Assessment["outcomeCounts"] {
   const counts: Record<Outcome, number> = {
     pass: 0,
     caution: 0,
@@ -74,7 +75,7 @@ function notShownOf(findings: readonly Finding[]): NotShown[] {
 
 /** Says what a verdict means, so that nobody reads more into a pass than was shown. */
 function verdictStatement(
-  verdict: SignOffAnswer["verdict"],
+  verdict: Assessment["verdict"],
   notShown: readonly NotShown[],
   waivers: readonly WaivedCheck[],
 ): string {

@@ -1,5 +1,5 @@
 import type { Bounds, Finding, Outcome } from "../finding.ts";
-import type { SignOffAnswer } from "../sign-off-schema.ts";
+import type { SignOffAnswer } from "../sign-off-answer.ts";
 import { digits } from "../statement.ts";
 import { html, type Markup } from "./html.ts";
 import { STYLE } from "./style.ts";
