@@ -1,14 +1,19 @@
 import { signOff } from "../sign-off.ts";
-import type { SignOffAnswer } from "../sign-off-answer.ts";
+import type { Assessment, SignOffAnswer } from "../sign-off-answer.ts";
 import type { SignOffRequest, SignOffResult } from "../sign-off-schema.ts";
 import { digestOf } from "./digest.ts";
 import { type Engine, RECORD_FORMAT, type SealedRecord } from "./record-schema.ts";
 
 /** A sign-off with its record, which nobody has sealed yet. */
 export function recordedSignOff(request: SignOffRequest, engine: Engine): SignOffAnswer {
-  const { cautions, ...assessed } = signOff(request);
-  const { criteria: _, ...result } = assessed;
-  return { ...assessed, record: recordOf(request, result, engine), cautions };
+  const assessment = signOff(request);
+  const { cautions, ...found } = assessment;
+  return { ...found, record: recordOf(request, resultOf(assessment), engine), cautions };
+}
+
+/** What of a sign-off goes on record. The criteria stand there in full, with the input. */
+export function resultOf({ criteria: _criteria, cautions: _cautions, ...result }: Assessment): SignOffResult {
+  return result;
 }
 
 function recordOf(input: SignOffRequest, result: SignOffResult, engine: Engine): SealedRecord {
