@@ -7,16 +7,22 @@ export async function sdkSchema(document: unknown): Promise<string> {
   return NOTICE + astToString(await openapiTS(document as OpenAPI3, { defaultNonNullable: false }));
 }
 
+interface Operation {
+  readonly operationId?: string;
+  readonly summary?: string;
+  readonly requestBody?: unknown;
+}
+
 /** What the client needs of each operation at run time: method, path, and whether it takes a body. */
 export function sdkOperations(document: unknown): string {
-  const { paths } = document as {
-    paths: Record<string, Record<string, { operationId?: string; requestBody?: unknown }>>;
-  };
+  const { paths } = document as { paths: Record<string, Record<string, Operation>> };
   const entries = Object.entries(paths).flatMap(([path, methods]) =>
-    Object.entries(methods).flatMap(([method, { operationId, requestBody }]) =>
+    Object.entries(methods).flatMap(([method, { operationId, summary, requestBody }]) =>
       operationId === undefined
         ? []
         : [
+            // An editor shows this sentence at the client's method.
+            `  /** ${summary}: \`${method.toUpperCase()} ${path}\` */`,
             `  ${operationId}: { method: ${JSON.stringify(method.toUpperCase())}, path: ${JSON.stringify(path)}, takesBody: ${requestBody !== undefined} },`,
           ],
     ),

@@ -1,8 +1,8 @@
-import { RodsetUnexpectedAnswer } from "./errors.ts";
-import { type CallOptions, type ClientOptions, exchange, parsed } from "./exchange.ts";
+import { addressOf, type CallOptions, type ClientOptions, exchange } from "./exchange.ts";
 import { OPERATIONS } from "./generated/operations.ts";
 import type { operations } from "./generated/schema.ts";
 
+/** Name of a question the service answers. */
 export type OperationId = keyof typeof OPERATIONS;
 
 /** What an operation takes; never where it takes nothing. */
@@ -19,8 +19,10 @@ export type AnswerOf<Id extends OperationId> = operations[Id] extends {
   ? Answer
   : never;
 
-/** Media types of an operation's answer beside JSON. */
-export type FormOf<Id extends OperationId> = operations[Id] extends { responses: { 200: { content: infer Content } } }
+/** Media types of an operation's answer beside JSON; never where there are none. */
+export type FormOf<Id extends OperationId> = operations[Id] extends {
+  responses: { 200: { content: infer Content } };
+}
   ? Exclude<keyof Content, "application/json"> & string
   : never;
 
@@ -30,27 +32,31 @@ type Arguments<Id extends OperationId> = [RequestOf<Id>] extends [never]
 
 /** One method for each operation of the service, and `form` for answers in another media type than JSON. */
 export type Client = {
-  readonly [Id in OperationId]: (...args: Arguments<Id>) => Promise<AnswerOf<Id>>;
+  // Written over the object itself, so that each method keeps the sentence that stands above it there.
+  readonly [Id in keyof typeof OPERATIONS]: (...args: Arguments<Id>) => Promise<AnswerOf<Id>>;
 } & {
   /** The answer of an operation as text in another of its media types, a report for instance. */
   form<Id extends OperationId>(id: Id, mediaType: FormOf<Id>, ...args: Arguments<Id>): Promise<string>;
 };
 
-/** A client of the service at `baseUrl`. It holds no connection and no state of its own. */
+/**
+ * A client of the service at `baseUrl`. It holds no connection and no state of its own.
+ *
+ * @throws {TypeError} where the address or the headers could never be sent.
+ */
 export function createClient(options: ClientOptions): Client {
+  addressOf(options.baseUrl, "/");
+  new Headers(options.headers);
+
   const call = (id: OperationId, mediaType: string, args: readonly unknown[]): Promise<string> => {
     const { method, path, takesBody } = OPERATIONS[id];
     const [body, callOptions] = takesBody ? args : [undefined, args[0]];
     return exchange(options, { ...(callOptions as CallOptions | undefined), method, path, body, mediaType });
   };
-  const methods = Object.keys(OPERATIONS).map((id) => [
+  const methods = (Object.keys(OPERATIONS) as OperationId[]).map((id) => [
     id,
-    async (...args: unknown[]) => {
-      const answer = parsed(await call(id as OperationId, "application/json", args));
-      if (answer === null) throw new RodsetUnexpectedAnswer(200, "application/json without JSON in it");
-      return answer;
-    },
+    async (...args: unknown[]): Promise<unknown> => JSON.parse(await call(id, "application/json", args)),
   ]);
   const form: Client["form"] = (id, mediaType, ...args) => call(id, mediaType, args);
-  return { ...Object.fromEntries(methods), form } as Client;
+  return { ...Object.fromEntries(methods), form };
 }

@@ -1,4 +1,11 @@
-export { type AnswerOf, type Client, createClient, type FormOf, type OperationId, type RequestOf } from "./client.ts";
+export {
+  type AnswerOf,
+  type Client,
+  createClient,
+  type FormOf,
+  type OperationId,
+  type RequestOf,
+} from "./client.ts";
 export {
   type ProblemDocument,
   type ProblemItem,
@@ -8,4 +15,4 @@ export {
   RodsetUnexpectedAnswer,
 } from "./errors.ts";
 export type { CallOptions, ClientOptions } from "./exchange.ts";
-export type { components } from "./generated/schema.ts";
+export type { Schema } from "./schema-of.ts";
