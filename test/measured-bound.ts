@@ -10,7 +10,7 @@ const SLACKEST = 50;
 const ROUNDING = 2.220446049250313e-16;
 
 /** The largest deviation of a list; a missing, non-finite or negative one is an error of the check itself. */
-export function worstOf(deviations: readonly Deviation[]): Deviation {
+function worstOf(deviations: readonly Deviation[]): Deviation {
   if (deviations.length === 0) throw new Error("nothing was compared");
   let worst = deviations[0]!;
   for (const deviation of deviations) {

@@ -13,7 +13,7 @@ import { scanLineEdges } from "./passband.ts";
 import { ratioForResolution } from "./set-point.ts";
 
 /** Relative change of the m/z of an edge per relative change of each cause; plain numbers. */
-export interface EdgeSensitivity {
+interface EdgeSensitivity {
   /** U and V together. */
   readonly amplitude: 1;
   readonly frequency: -2;

@@ -7,7 +7,7 @@ export interface Side {
 }
 
 /** What the case is held to: a time of side a at most, or a speed of side a over that of b at least. */
-export type Target =
+type Target =
   | { readonly of: "time"; readonly most: number; readonly stretch?: number }
   | { readonly of: "speed"; readonly least: number };
 

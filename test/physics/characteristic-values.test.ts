@@ -9,6 +9,7 @@ import {
 import { halfPeriodExtended } from "../../services/physics/half-period-extended.ts";
 import { type Deviation, expectWithin } from "../measured-bound.ts";
 import { CHARACTERISTIC_VALUES, STABILITY_REGIONS } from "../reference/tables.ts";
+import { SECOND_REGION, THIRD_REGION_CORNERS } from "../reference/worked-examples.ts";
 
 /** "a_2" or "a=-b_1(q)" to the value of that curve. */
 function onCurve(name: string, q: number): number {
@@ -86,6 +87,20 @@ test("every corner of every region lies on both of its curves", () => {
   }
   expect(deviations.length).toBeGreaterThanOrEqual(40);
   expectWithin(5e-15, deviations);
+});
+
+test("apexes of the second and third region as published", () => {
+  const { apexQ, apexA } = SECOND_REGION;
+  expectWithin(1e-4, [
+    { at: "b_2 at the second apex", error: Math.abs(characteristicB(2, apexQ)! - apexA) },
+    { at: "a_1 at the second apex", error: Math.abs(characteristicA(1, apexQ)! + apexA) },
+  ]);
+  for (const { a, q, x, y } of THIRD_REGION_CORNERS) {
+    expectWithin(1e-5, [
+      { at: `${x} at q ${q}`, error: Math.abs(onCurve(x, q) - a) },
+      { at: `${y} at q ${q}`, error: Math.abs(onCurve(y, q) + a) },
+    ]);
+  }
 });
 
 test("at a characteristic value one of the half-period values vanishes: the two methods verify each other", () => {

@@ -126,6 +126,24 @@ test("the width of a nearly closed window follows the exact constant", () => {
   }
 });
 
+test("neighbouring doubles of U narrow the window by equal steps, though their U/V round to the same double", () => {
+  const rf = 2.9;
+  const lastPlace = 2 ** -54;
+  const first = Math.round((rf * (APEX_RATIO - 1.264e-8)) / lastPlace) * lastPlace;
+  const widths = Array.from({ length: 201 }, (_, i) => {
+    const answer = passbandOf(first + i * lastPlace, rf, { fieldRadius: 0.004, frequency: 1.2e6 });
+    if (answer.kind !== "window") throw new Error(answer.kind);
+    return answer.passband.mzWidth!;
+  });
+  const ratios = new Set(widths.map((_, i) => (first + i * lastPlace) / rf));
+  expect(ratios.size).toBeLessThan(widths.length);
+  const mean = (widths[0]! - widths.at(-1)!) / 200;
+  expectWithin(
+    1e-5,
+    widths.slice(1).map((width, i) => ({ at: `step ${i}`, error: relativeError(widths[i]! - width, mean) })),
+  );
+});
+
 test("RF alone is unbounded above, no RF passes nothing", () => {
   const field = { fieldRadius: 0.004, frequency: 1.2e6 };
   const open = passbandOf(0, 800, field);
