@@ -1,7 +1,7 @@
 import { type ChildProcess, spawn } from "node:child_process";
 import { once } from "node:events";
 import { existsSync } from "node:fs";
-import { connect, type Socket } from "node:net";
+import { type AddressInfo, connect, createServer, type Socket } from "node:net";
 import { createInterface } from "node:readline";
 import { afterEach, beforeAll, describe, expect, it } from "vitest";
 import { stability } from "../../services/http/endpoints/stability.ts";
@@ -149,10 +149,24 @@ describe("the built service", () => {
   });
 
   it("can be told to log nothing", async () => {
-    service = new Service({ RODSET_LOG_LEVEL: "silent", RODSET_PORT: "0" });
-    await new Promise((resolve) => setTimeout(resolve, 1500));
+    const adminPort = await freePort();
+    service = new Service({ RODSET_LOG_LEVEL: "silent", RODSET_ADMIN_PORT: String(adminPort) });
+    const ready = () =>
+      fetch(`http://127.0.0.1:${adminPort}/readyz`).then(
+        ({ status }) => status === 200,
+        () => false,
+      );
+    while (!(await ready())) await new Promise((resolve) => setTimeout(resolve, 20));
     service.process.kill("SIGTERM");
     expect(await service.exitCode()).toBe(0);
     expect(service.lines).toEqual([]);
   });
 });
+
+async function freePort(): Promise<number> {
+  const server = createServer().listen(0, "127.0.0.1");
+  await once(server, "listening");
+  const { port } = server.address() as AddressInfo;
+  server.close();
+  return port;
+}
