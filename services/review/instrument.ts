@@ -9,6 +9,25 @@ import { Width } from "../contract/width.ts";
 
 const MAX_POINTS = 200;
 
+export const OperatingPointByLaw = z
+  .strictObject({
+    by: z.literal("drive-law"),
+    rfPerMz: Rf.meta({
+      description: "RF volts per unit of set m/z, in the convention stated beside them.",
+    }),
+    dcSlope: quantity(
+      "U/V of the straight line, U and V between the same points and V zero-to-peak, dimensionless.",
+      0,
+      1,
+    ),
+    dcOffset_V: quantity(
+      "What the straight line takes off: U = dcSlope V - dcOffset_V, between the points that rfPerMz names.",
+      -1e4,
+      1e4,
+    ),
+  })
+  .meta({ id: "OperatingPointByLaw", description: "The straight line that the supply follows." });
+
 export const OperatingPoint = z
   .discriminatedUnion("by", [
     z
@@ -37,24 +56,7 @@ export const OperatingPoint = z
           .max(MAX_POINTS),
       })
       .meta({ id: "OperatingPointByDrives", description: "Voltages read from the supply at set m/z." }),
-    z
-      .strictObject({
-        by: z.literal("drive-law"),
-        rfPerMz: Rf.meta({
-          description: "RF volts per unit of set m/z, in the convention stated beside them.",
-        }),
-        dcSlope: quantity(
-          "U/V of the straight line, U and V between the same points and V zero-to-peak, dimensionless.",
-          0,
-          1,
-        ),
-        dcOffset_V: quantity(
-          "What the straight line takes off: U = dcSlope V - dcOffset_V, between the points that rfPerMz names.",
-          -1e4,
-          1e4,
-        ),
-      })
-      .meta({ id: "OperatingPointByLaw", description: "The straight line that the supply follows." }),
+    OperatingPointByLaw,
     z.strictObject({ by: z.literal("stated"), width: Width }).meta({
       id: "OperatingPointStated",
       description: "Only claimed: what follows from it proves nothing.",

@@ -34,12 +34,12 @@ function filterSetting({ window, filter, acquisition, pointer, ion, mz, setMz }:
 function cellSetting({ placed, acquisition, product, cutoffMz, setting }: Guiding): Setting {
   const stated = setting?.rf.mode === "fixed" ? { rf: setting.rf.rf } : null;
   return {
-    pointer: product!.pointer,
+    pointer: product.pointer,
     acquisition: acquisition.id,
     stage: placed.stage.name,
-    ion: product!.ion,
-    mz: product!.mz,
-    setMz: product!.setMz,
+    ion: product.ion,
+    mz: product.mz,
+    setMz: product.setMz,
     window: null,
     drive: stated,
     cutoffMz,

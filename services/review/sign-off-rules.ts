@@ -18,10 +18,13 @@ export function signOffErrors({ instrument, method, criteria }: SignOffRequest):
 function criteriaErrors(criteria: Criteria): ErrorItem[] {
   return CHECKS.flatMap(({ id }) => {
     const criterion = criteria.checks[id];
-    if (criterion?.pass === undefined) return [];
+    if (criterion === undefined) return [];
     const pointer = `/criteria/checks/${id}`;
-    const crossed =
-      criterion.caution !== undefined && narrower(criterion.caution, criterion.pass)
+    const { pass, caution } = criterion;
+    return [
+      ...emptyLimit(pass, `${pointer}/pass`),
+      ...emptyLimit(caution, `${pointer}/caution`),
+      ...(pass !== undefined && caution !== undefined && isStricter(caution, pass)
         ? [
             {
               pointer: `${pointer}/caution`,
@@ -29,29 +32,30 @@ function criteriaErrors(criteria: Criteria): ErrorItem[] {
               detail: "caution is stricter than pass; it must be the wider of both.",
             },
           ]
-        : [];
-    const { min, max } = criterion.pass;
-    const empty =
-      min !== undefined && max !== undefined && min > max
-        ? [
-            {
-              pointer: `${pointer}/pass/max`,
-              code: "not-above",
-              detail: `max is ${max}; it must not be below min, ${min}.`,
-            },
-          ]
-        : [];
-    return [...crossed, ...empty];
+        : []),
+    ];
   });
 }
 
-function narrower(caution: Limit, pass: Limit): boolean {
-  const above = (one: number | undefined, other: number | undefined) =>
-    one !== undefined && other !== undefined && one > other;
+function emptyLimit(limit: Limit | undefined, pointer: string): ErrorItem[] {
+  if (limit?.min === undefined || limit.max === undefined || limit.min <= limit.max) return [];
+  return [
+    {
+      pointer: `${pointer}/max`,
+      code: "not-above",
+      detail: `max is ${limit.max}; it must not be below min, ${limit.min}.`,
+    },
+  ];
+}
+
+const LOWER_PARTS = ["min", "minOfWidth", "minOfTolerance", "minCounts"] as const;
+const UPPER_PARTS = ["max", "maxOfWidth"] as const;
+
+function isStricter(one: Limit, other: Limit): boolean {
+  const above = (larger: number | undefined, smaller: number | undefined) =>
+    larger !== undefined && smaller !== undefined && larger > smaller;
   return (
-    above(caution.min, pass.min) ||
-    above(pass.max, caution.max) ||
-    above(caution.minOfWidth, pass.minOfWidth) ||
-    above(pass.maxOfWidth, caution.maxOfWidth)
+    LOWER_PARTS.some((part) => above(one[part], other[part])) ||
+    UPPER_PARTS.some((part) => above(other[part], one[part]))
   );
 }

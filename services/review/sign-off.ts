@@ -32,7 +32,7 @@ export function signOff({ instrument, method, criteria }: SignOffRequest): Asses
   const notShown = notShownOf(findings);
   return {
     verdict,
-    verdictStatement: verdictStatement(verdict, notShown, waivers),
+    verdictStatement: verdictStatement(verdict, findings, notShown, waivers),
     outcomeCounts: countOutcomes(findings),
     findings,
     settings: settingsOf(resolved),
@@ -76,6 +76,7 @@ function notShownOf(findings: readonly Finding[]): NotShown[] {
 /** Says what a verdict means, so that nobody reads more into a pass than was shown. */
 function verdictStatement(
   verdict: Assessment["verdict"],
+  findings: readonly Finding[],
   notShown: readonly NotShown[],
   waivers: readonly WaivedCheck[],
 ): string {
@@ -85,7 +86,11 @@ function verdictStatement(
     fail: "At least one required check missed its limit",
     indeterminate: "At least one required check lacks an input, or nothing was judged",
   }[verdict];
-  const unshown = [...new Set(notShown.map(({ check }) => check)), "peak-tails"];
+  const unshown = new Set([...notShown.map(({ check }) => check), "peak-tails"]);
+  const uncounted = new Set(
+    findings.filter(({ outcome, required }) => outcome === "fail" && !required).map(({ check }) => check),
+  );
+  const failing = uncounted.size === 0 ? "" : `; failing but not counted: ${listed([...uncounted])}`;
   const waived = waivers.length === 0 ? "" : `; waived: ${listed(waivers.map(({ check }) => check))}`;
-  return `${meaning}; not shown: ${listed([...new Set(unshown)])}${waived}.`;
+  return `${meaning}; not shown: ${listed([...unshown])}${failing}${waived}.`;
 }

@@ -1,9 +1,10 @@
 import { fieldOf } from "../../contract/rod-set.ts";
 import { adiabaticity, wellDepth } from "../../physics/rf-only.ts";
 import { defineCheck } from "../check.ts";
-import type { Bounds, PassesIf } from "../finding.ts";
+import type { Bounds } from "../finding.ts";
+import { passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
-import type { Observation } from "../observation.ts";
+import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
 import type { GuidedIon, Guiding } from "../resolve/resolved-method.ts";
 import { digits } from "../statement.ts";
 
@@ -33,13 +34,27 @@ export const cellWellDepth = defineCheck({
   defaults: { pass: { min: 3 }, caution: { min: 1 } },
   basis:
     "Usable to 0.8 r0 while the adiabaticity stays below 0.3 (Gerlich, Adv. Chem. Phys. 82, 1992, from memory); 3 and 1 are common practice, no source.",
-  examine: (method, limits) =>
-    method.acquisitions.flatMap(({ cells }) =>
+  examine: (method, limits) => {
+    const pass = boundsOf(limits.pass);
+    const caution = boundsOf(limits.caution);
+    const observe = (cell: Guiding, guided: GuidedIon, which: "precursor" | "product"): Observation => ({
+      quantity: `${which}-depth-over-energy`,
+      unit: "1",
+      subject: {
+        pointer: guided.pointer,
+        acquisition: cell.acquisition.id,
+        stage: cell.placed.stage.name,
+        ion: guided.ion,
+      },
+      ...depthOverEnergy(cell, guided.mz, which, pass, caution),
+    });
+    return method.acquisitions.flatMap(({ cells }) =>
       cells.flatMap((cell) => [
-        depthOverEnergy(cell, cell.precursor!, "precursor", boundsOf(limits.pass), boundsOf(limits.caution)),
-        depthOverEnergy(cell, cell.product!, "product", boundsOf(limits.pass), boundsOf(limits.caution)),
+        observe(cell, cell.precursor ?? cell.product, "precursor"),
+        observe(cell, cell.product, "product"),
       ]),
-    ),
+    );
+  },
 });
 
 function radialEnergyOf({ placed: { stage } }: Guiding): number | undefined {
@@ -53,67 +68,44 @@ export function wellDepthKnown(cell: Guiding): boolean {
 
 function depthOverEnergy(
   cell: Guiding,
-  { pointer, ion, mz }: GuidedIon,
+  mz: number,
   which: "precursor" | "product",
   pass: Bounds,
   caution: Bounds,
-): Observation {
-  const { stage } = cell.placed;
-  const about = {
-    quantity: `${which}-depth-over-energy`,
-    unit: "1",
-    subject: { pointer, acquisition: cell.acquisition.id, stage: stage.name, ion },
-  };
+): Reading {
+  const { rfVolts, rodSet, polePairs, placed } = cell;
+  const { name } = placed.stage;
   const energy = radialEnergyOf(cell);
-  const missing = [
-    ...(energy === undefined ? [`${cell.placed.pointer}/maxRadialEnergy_eVPerCharge`] : []),
-    ...(cell.rodSet === null ? [`${cell.placed.pointer}/rodSet`] : []),
-    ...cell.rfMissing.filter((input) => input !== `${cell.placed.pointer}/rodSet`),
-  ];
-  if (energy === undefined || cell.rodSet === null || cell.rfVolts === null) {
-    return {
-      ...about,
-      kind: "indeterminate",
-      missing,
-      statement: `The well depth of ${stage.name} does not follow without ${missing.join(", ")}.`,
-    };
+  if (energy === undefined || rodSet === null || rfVolts === null) {
+    return lacking(`The well depth of ${name}`, [
+      ...(energy === undefined ? [`${placed.pointer}/maxRadialEnergy_eVPerCharge`] : []),
+      ...(rodSet === null ? [`${placed.pointer}/rodSet`] : []),
+      ...cell.rfMissing,
+    ]);
   }
-  const field = fieldOf(cell.rodSet);
-  const eta = adiabaticity(cell.rfVolts, mz, field, cell.polePairs, USABLE_RADIUS);
+  const field = fieldOf(rodSet);
+  const eta = adiabaticity(rfVolts, mz, field, polePairs, USABLE_RADIUS);
   if (eta > ADIABATIC_LIMIT) {
-    return {
-      ...about,
-      kind: "not-applicable",
-      statement: `The adiabaticity of m/z ${mz} in ${stage.name} is ${digits(eta, 3)}, above ${ADIABATIC_LIMIT}: an effective potential does not describe its motion.`,
-    };
+    return notApplicable(
+      `The adiabaticity of m/z ${mz} in ${name} is ${digits(eta, 3)}, above ${ADIABATIC_LIMIT}: an effective potential does not describe its motion.`,
+    );
   }
-  const depth = wellDepth(cell.rfVolts, mz, field, cell.polePairs, USABLE_RADIUS);
+  const depth = wellDepth(rfVolts, mz, field, polePairs, USABLE_RADIUS);
   const value = depth / energy;
   return {
-    ...about,
     kind: "value",
     value,
     evidence: cell.evidence,
     pass,
     caution,
-    passesIf: passesIfDeeper(cell, value, pass.min),
-    statement: `${which === "precursor" ? "Precursor" : "Product"} m/z ${mz}: the well at 0.8 r0 of ${stage.name} is ${digits(depth, 4)} eV per charge deep, ${digits(value, 3)} times the stated radial energy (adiabaticity ${digits(eta, 2)}).`,
+    // The depth grows with the square of the RF, and the adiabaticity with the RF.
+    passesIf: () =>
+      pass.min === null
+        ? null
+        : passesIfWithin(cell.voltsLever, {
+            min: Math.sqrt((pass.min * energy) / wellDepth(1, mz, field, polePairs, USABLE_RADIUS)),
+            max: ADIABATIC_LIMIT / adiabaticity(1, mz, field, polePairs, USABLE_RADIUS),
+          }),
+    statement: `${which === "precursor" ? "Precursor" : "Product"} m/z ${mz}: the well at 0.8 r0 of ${name} is ${digits(depth, 4)} eV per charge deep, ${digits(value, 3)} times the stated radial energy (adiabaticity ${digits(eta, 2)}).`,
   };
-}
-
-/** The depth grows with the square of the RF, so each input that sets the RF grows with the root. */
-function passesIfDeeper(cell: Guiding, value: number, min: number | null): PassesIf | null {
-  if (cell.setting === null || min === null || value <= 0) return null;
-  const { rf, pointer } = cell.setting;
-  const factor = Math.sqrt(min / value);
-  switch (rf.mode) {
-    case "fixed":
-      return { input: `${pointer}/rf/volts`, min: rf.rf.volts * factor, max: null, unit: "V" };
-    case "cutoff":
-      return { input: `${pointer}/mz`, min: rf.mz * factor, max: null, unit: "1" };
-    case "table":
-      return { input: `${pointer}/points`, min: cell.cutoffMz! * factor, max: null, unit: "1" };
-    default:
-      return { input: `${pointer}/q`, min: rf.q * factor, max: null, unit: "1" };
-  }
 }

@@ -1,6 +1,9 @@
+import { quantity } from "../../contract/quantity.ts";
 import { defineCheck, type Limits } from "../check.ts";
+import type { Bounds, PassesIf } from "../finding.ts";
+import { leverOn, passesIfWithin } from "../lever.ts";
 import { boundsOf, type Limit, LowerLimitOfDwell } from "../limit.ts";
-import type { Observation } from "../observation.ts";
+import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
 import type { ResolvedAcquisition, ResolvedMethod } from "../resolve/resolved-method.ts";
 import { isCounted, type Moment, momentText } from "../resolve/schedule.ts";
 import { digits } from "../statement.ts";
@@ -20,95 +23,101 @@ export const dwellTime = defineCheck({
   basis:
     "Counting statistics: n counts scatter by 1/sqrt(n), so 100 counts by 10 % and 25 by 20 %. The limits, and 5 ms and 1 ms where no count rate is stated, are common practice, no source.",
   examine: (method, limits) => {
-    const observations = method.acquisitions.flatMap((each) => {
-      const shortest = shortestDwell(method, each);
-      return shortest === null ? [] : [dwellOf(each, shortest, limits)];
+    const observations = method.acquisitions.flatMap((each): Observation[] => {
+      const { acquisition, pointer } = each;
+      if (!isCounted(acquisition)) return [];
+      // Criteria that limit only the time judge the time, whatever the rate.
+      const rate = limits.pass.minCounts === undefined ? undefined : acquisition.countRate_perS;
+      return [
+        {
+          quantity: rate === undefined ? "dwell" : "counts",
+          unit: rate === undefined ? "ms" : "1",
+          subject: { pointer, acquisition: acquisition.id },
+          ...dwellOrCounts(method, each, rate, limits),
+        },
+      ];
     });
     if (observations.length > 0) return observations;
-    return [
-      {
-        kind: "not-applicable",
-        quantity: "dwell",
-        unit: "ms",
-        subject: { pointer: "/method/acquisition" },
-        statement: "The method only scans: it dwells on no ion.",
-      },
-    ];
+    const none = notApplicable("The method only scans: it dwells on no ion.");
+    return [{ quantity: "dwell", unit: "ms", subject: { pointer: "/method/acquisition" }, ...none }];
   },
 });
 
-interface Shortest {
-  readonly dwell_ms: number | null;
-  readonly missing: readonly string[];
-  readonly moment: Moment | null;
-}
-
-/** The dwell time an acquisition states, or the least that a shared cycle leaves it; null where it scans. */
-function shortestDwell(
-  { method, schedule }: ResolvedMethod,
-  { acquisition, pointer }: ResolvedAcquisition,
-): Shortest | null {
-  if (!isCounted(acquisition)) return null;
-  if (method.timing.mode === "dwell") {
-    const dwell_ms = acquisition.dwell_ms ?? null;
-    return { dwell_ms, missing: dwell_ms === null ? [`${pointer}/dwell_ms`] : [], moment: null };
-  }
-  const index = method.acquisition.indexOf(acquisition);
-  const moments = schedule.moments.filter(({ active }) => active.includes(index));
-  if (schedule.missing.length > 0) return { dwell_ms: null, missing: schedule.missing, moment: null };
-  const busiest = moments.reduce((worst, moment) =>
-    moment.sharedDwell_ms! < worst.sharedDwell_ms! ? moment : worst,
-  );
-  return { dwell_ms: busiest.sharedDwell_ms, missing: [], moment: busiest };
-}
-
-function dwellOf(
-  { acquisition, pointer }: ResolvedAcquisition,
-  shortest: Shortest,
+function dwellOrCounts(
+  method: ResolvedMethod,
+  each: ResolvedAcquisition,
+  rate: number | undefined,
   limits: Limits<Limit>,
-): Observation {
-  const rate = isCounted(acquisition) ? acquisition.countRate_perS : undefined;
-  const about = {
-    quantity: rate === undefined ? "dwell" : "counts",
-    unit: rate === undefined ? "ms" : "1",
-    subject: { pointer, acquisition: acquisition.id },
-  };
-  const { dwell_ms, missing, moment } = shortest;
-  if (dwell_ms === null) {
-    return {
-      ...about,
-      kind: "indeterminate",
-      missing,
-      statement: `The dwell time does not follow without ${missing.join(", ")}.`,
-    };
-  }
+): Reading {
+  const { acquisition } = each;
+  const shortest = shortestDwell(method, each);
+  if ("missing" in shortest) return lacking(`The dwell time of ${acquisition.id}`, shortest.missing);
+  const { dwell_ms, moment } = shortest;
   const value = rate === undefined ? dwell_ms : (rate * dwell_ms) / 1e3;
-  const pass =
-    rate === undefined ? boundsOf({ min: limits.pass.min }) : boundsOf({ min: limits.pass.minCounts });
+  const limited = ({ min, minCounts }: Limit): Bounds =>
+    boundsOf({ min: rate === undefined ? min : minCounts });
+  const pass = limited(limits.pass);
   const caution =
-    rate === undefined ? boundsOf({ min: limits.caution.min }) : boundsOf({ min: limits.caution.minCounts });
-  const needed_ms =
-    pass.min === null ? null : rate === undefined ? pass.min : rate > 0 ? (pass.min * 1e3) / rate : null;
+    limits.caution.minCounts === undefined && rate !== undefined ? pass : limited(limits.caution);
   return {
-    ...about,
     kind: "value",
     value,
     evidence: "stated",
     pass,
     caution,
-    passesIf:
-      needed_ms === null
-        ? null
-        : {
-            input: moment === null ? `${pointer}/dwell_ms` : "/method/timing/dwellMin_ms",
-            min: needed_ms,
-            max: null,
-            unit: "ms",
-          },
+    passesIf: () => passesIfLonger(method, each, shortest, rate, pass),
     statement:
       (rate === undefined
         ? `${acquisition.id} dwells for ${digits(dwell_ms, 4)} ms`
         : `${acquisition.id} collects about ${digits(value, 4)} counts in ${digits(dwell_ms, 4)} ms`) +
       (moment === null ? "." : ` at its busiest: ${momentText(moment)}.`),
   };
+}
+
+interface Shortest {
+  readonly dwell_ms: number;
+  /** Where a shared cycle leaves least; null where the acquisition states its dwell time. */
+  readonly moment: Moment | null;
+}
+
+/** The dwell time an acquisition states, or else the least that a shared cycle leaves it. */
+function shortestDwell(
+  { schedule }: ResolvedMethod,
+  { acquisition, index, pointer }: ResolvedAcquisition,
+): Shortest | { readonly missing: readonly string[] } {
+  const stated = isCounted(acquisition) ? acquisition.dwell_ms : undefined;
+  if (stated !== undefined) return { dwell_ms: stated, moment: null };
+  const moment = schedule.turns[index]!.busiest;
+  if (schedule.missing.length > 0) return { missing: schedule.missing };
+  if (moment.sharedDwell_ms === null) return { missing: [`${pointer}/dwell_ms`] };
+  return { dwell_ms: moment.sharedDwell_ms, moment };
+}
+
+const Dwell_ms = quantity("A dwell time in ms.", 0, 1e6);
+
+function passesIfLonger(
+  { method }: ResolvedMethod,
+  { pointer }: ResolvedAcquisition,
+  { dwell_ms, moment }: Shortest,
+  rate: number | undefined,
+  { min }: Bounds,
+): PassesIf | null {
+  if (min === null) return null;
+  if (rate === 0) {
+    if (dwell_ms === 0) return null;
+    const countRate = leverOn(`${pointer}/countRate_perS`, "s-1", { minValue: 0, maxValue: 1e12 });
+    return passesIfWithin(countRate, { min: (min * 1e3) / dwell_ms, max: null });
+  }
+  const needed = { min: rate === undefined ? min : (min * 1e3) / rate, max: null };
+  const { timing } = method;
+  if (moment === null || timing.mode === "dwell") {
+    return passesIfWithin(leverOn(`${pointer}/dwell_ms`, "ms", Dwell_ms), needed);
+  }
+  const shortest = leverOn("/method/timing/dwellMin_ms", "ms", {
+    minValue: 0,
+    maxValue: timing.dwellMax_ms,
+  });
+  const longest = leverOn("/method/timing/dwellMax_ms", "ms", Dwell_ms);
+  // Where the cycle would leave more than the longest dwell time, that alone holds it back.
+  return passesIfWithin(dwell_ms < timing.dwellMax_ms ? shortest : longest, needed);
 }

@@ -15,7 +15,9 @@ export function eachIon(
   return method.filters.flatMap((filter) => {
     const observations = method.acquisitions.flatMap(({ filterings }) =>
       filterings
-        .filter((filtering) => filtering.filter === filter && targets.includes(filtering.target))
+        .filter(
+          (filtering) => filtering.filter.pointer === filter.pointer && targets.includes(filtering.target),
+        )
         .flatMap((filtering) => observe(filtering) ?? []),
     );
     if (observations.length > 0) return observations;

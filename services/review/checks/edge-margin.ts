@@ -1,12 +1,12 @@
-import type { Limits } from "../check.ts";
-import { defineCheck } from "../check.ts";
-import type { Bounds, PassesIf } from "../finding.ts";
+import { defineCheck, type Limits } from "../check.ts";
+import type { Bounds } from "../finding.ts";
 import { boundsOf, type Limit, LowerLimitByWidth } from "../limit.ts";
-import type { Observation } from "../observation.ts";
-import { type Drift, driftOf } from "../resolve/drift.ts";
+import { lacking, type Observation, type Reading } from "../observation.ts";
+import { driftOf } from "../resolve/drift.ts";
 import type { Filtering } from "../resolve/resolved-method.ts";
-import { heightNote, type KnownWindow, standsForEdges, widthOf } from "../resolve/window.ts";
+import { heightNote, type KnownWindow, standsForEdges, type Window, widthOf } from "../resolve/window.ts";
 import { digits } from "../statement.ts";
+import { passesIfWindowMoves } from "./window-that-passes.ts";
 
 export const edgeMargin = defineCheck({
   id: "edge-margin",
@@ -34,77 +34,68 @@ export const edgeMargin = defineCheck({
     method.acquisitions.flatMap(({ filterings }) =>
       filterings
         .filter(({ target }) => target === "ion")
-        .map((filtering) => distanceToEdge(filtering, limits)),
+        .map((filtering): Observation => {
+          const { pointer, acquisition, filter, ion } = filtering;
+          return {
+            quantity: "distance-to-edge",
+            unit: "1",
+            subject: { pointer, acquisition: acquisition.id, stage: filter.stage.name, ion },
+            ...distanceToEdge(filtering, limits),
+          };
+        }),
     ),
 });
 
-function distanceToEdge(filtering: Filtering, limits: Limits<Limit>): Observation {
-  const { window, filter, acquisition, ion, mz } = filtering;
-  const about = {
-    quantity: "distance-to-edge",
-    unit: "1",
-    subject: { pointer: filtering.pointer, acquisition: acquisition.id, stage: filter.stage.name, ion },
-  };
-  if (window.kind === "unknown") {
-    return { ...about, kind: "indeterminate", missing: window.missing, statement: window.reason };
+function distanceToEdge(filtering: Filtering, limits: Limits<Limit>): Reading {
+  const { window, filter, mz } = filtering;
+  const { name } = filter.stage;
+  const what = `How far m/z ${mz} lies from the edges of its window in ${name}`;
+  const passesIf = () => passesIfWindowMoves(filtering, (changed) => passesIn(changed, filtering, limits));
+  if (window.kind === "unknown") return lacking(what, window.missing);
+  if (window.kind === "no-window") {
+    const pass = boundsOf(limits.pass);
+    const caution = boundsOf(limits.caution);
+    const statement = `${name}: ${window.reason}`;
+    return { kind: "impossible", evidence: window.evidence, pass, caution, passesIf, statement };
   }
-  if (window.kind === "empty") {
-    return {
-      ...about,
-      kind: "impossible",
-      evidence: window.evidence,
-      pass: boundsOf(limits.pass),
-      caution: boundsOf(limits.caution),
-      passesIf: null,
-      statement: `${filter.stage.name}: ${window.reason}`,
-    };
-  }
-  if (!standsForEdges(window, "narrow")) {
-    return {
-      ...about,
-      kind: "indeterminate",
-      missing: [window.widthPointer],
-      statement:
-        "A width at a tenth of the height is wider than the one between the edges and may not stand for it here.",
-    };
-  }
-  const drift = driftOf(filter.stage.tolerances, window);
-  const pass = boundsOf(limits.pass, widthOf(window));
-  const value = Math.min(mz - window.mzLow, window.mzHigh - mz) - drift.inward;
-  const driftNote = drift.stated
-    ? `after a drift of ${digits(drift.inward, 3)}`
-    : "with no drift allowed for, none is stated";
+  const distance = distanceIn(window, filtering, limits);
+  if (distance === null) return lacking(what, [window.widthPointer]);
+  const { value, pass, drift } = distance;
+  const inward = mz - window.mzLow < window.mzHigh - mz ? drift.low : drift.high;
   return {
-    ...about,
     kind: "value",
     value,
     evidence: window.evidence,
     pass,
     caution: boundsOf(limits.caution, widthOf(window)),
-    passesIf: passesIfMoved(filtering, window, drift, pass, limits.pass),
+    passesIf,
     statement:
       `m/z ${mz} lies ${digits(Math.abs(value), 3)} ${value < 0 ? "outside" : "inside"} the nearer edge of ` +
-      `${digits(window.mzLow, 7)} to ${digits(window.mzHigh, 7)} in ${filter.stage.name}, ${driftNote}.` +
+      `${digits(window.mzLow, 7)} to ${digits(window.mzHigh, 7)} in ${name}, ` +
+      (drift.stated
+        ? `after a drift of ${digits(inward, 3)}.`
+        : "with no drift allowed for, none is stated.") +
       heightNote(window),
   };
 }
 
-/** Moving the set m/z helps where the window is wide enough for the ion in its middle; else only a wider window does. */
-function passesIfMoved(
-  filtering: Filtering,
-  window: KnownWindow,
-  drift: Drift,
-  pass: Bounds,
-  limit: Limit,
-): PassesIf | null {
-  if (pass.min === null) return null;
-  const needed = pass.min + drift.inward;
-  const low = filtering.setMz + filtering.mz + needed - window.mzHigh;
-  const high = filtering.setMz + filtering.mz - needed - window.mzLow;
-  if (low <= high) return { input: filtering.setMzPointer, min: low, max: high, unit: "1" };
-  const fraction = limit.minOfWidth ?? 0;
-  if (fraction >= 0.5) return null;
-  const byFraction = drift.inward / (0.5 - fraction);
-  const byDistance = 2 * ((limit.min ?? 0) + drift.inward);
-  return { input: window.widthPointer, min: Math.max(byFraction, byDistance), max: null, unit: "1" };
+interface Distance {
+  readonly value: number;
+  readonly pass: Bounds;
+  readonly drift: NonNullable<ReturnType<typeof driftOf>>;
+}
+
+/** Null where the width may not stand for the one between the edges, or no scan line gives its drift. */
+function distanceIn(window: KnownWindow, { filter, mz }: Filtering, limits: Limits<Limit>): Distance | null {
+  const drift = standsForEdges(window, "narrow") ? driftOf(filter.stage.tolerances, window) : null;
+  if (drift === null) return null;
+  const value = Math.min(mz - window.mzLow - drift.low, window.mzHigh - mz - drift.high);
+  return { value, pass: boundsOf(limits.pass, widthOf(window)), drift };
+}
+
+function passesIn(window: Window, filtering: Filtering, limits: Limits<Limit>): boolean {
+  const distance = window.kind === "window" ? distanceIn(window, filtering, limits) : null;
+  if (distance === null) return false;
+  const { value, pass } = distance;
+  return (pass.min === null || value >= pass.min) && (pass.max === null || value <= pass.max);
 }

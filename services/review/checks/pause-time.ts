@@ -1,8 +1,10 @@
+import { Time_ms } from "../../contract/quantity.ts";
 import { flightTimeOf } from "../../contract/residence.ts";
 import { defineCheck } from "../check.ts";
 import type { Bounds } from "../finding.ts";
+import { leverOn, passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
-import type { Observation } from "../observation.ts";
+import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
 import { previousWithSameProduct } from "../resolve/predecessor.ts";
 import type { ResolvedAcquisition, ResolvedMethod } from "../resolve/resolved-method.ts";
 import { digits } from "../statement.ts";
@@ -27,8 +29,13 @@ export const pauseTime = defineCheck({
   basis:
     "A shorter pause lets ions of one set point be counted at the next (cross-talk): common practice, no source.",
   examine: (method, limits) =>
-    method.acquisitions.map((each) =>
-      pauseOverNeeded(method, each, boundsOf(limits.pass), boundsOf(limits.caution)),
+    method.acquisitions.map(
+      (each): Observation => ({
+        quantity: "pause-over-needed",
+        unit: "1",
+        subject: { pointer: each.pointer, acquisition: each.acquisition.id },
+        ...pauseOverNeeded(method, each, boundsOf(limits.pass), boundsOf(limits.caution)),
+      }),
     ),
 });
 
@@ -37,47 +44,32 @@ function pauseOverNeeded(
   each: ResolvedAcquisition,
   pass: Bounds,
   caution: Bounds,
-): Observation {
+): Reading {
   const { acquisition, pointer } = each;
-  const about = {
-    quantity: "pause-over-needed",
-    unit: "1",
-    subject: { pointer, acquisition: acquisition.id },
-  };
-  const missing: string[] = [];
-  if (acquisition.pause_ms === undefined) missing.push(`${pointer}/pause_ms`);
+  const { pause_ms } = acquisition;
+  const missing = pause_ms === undefined ? [`${pointer}/pause_ms`] : [];
   const settle_ms = settling(method, each, missing);
   const flight_ms = flight(method, each, missing);
   const previous = previousWithSameProduct(method, each);
   const clearing_ms = previous === null ? 0 : clearing(method, missing);
-  if (missing.length > 0) {
-    return {
-      ...about,
-      kind: "indeterminate",
-      missing,
-      statement: `The pause before ${acquisition.id} cannot be judged without ${missing.join(", ")}.`,
-    };
+  if (pause_ms === undefined || missing.length > 0) {
+    return lacking(`Whether the pause before ${acquisition.id} is long enough`, missing);
   }
   const needed_ms = settle_ms + flight_ms + clearing_ms;
-  const pause_ms = acquisition.pause_ms!;
-  if (needed_ms === 0) {
-    return {
-      ...about,
-      kind: "not-applicable",
-      statement: "Settling, flight and clearing are stated to take no time.",
-    };
-  }
+  if (needed_ms === 0) return notApplicable("Settling, flight and clearing are stated to take no time.");
   return {
-    ...about,
     kind: "value",
     value: pause_ms / needed_ms,
     evidence: "computed",
     pass,
     caution,
-    passesIf:
+    passesIf: () =>
       pass.min === null
         ? null
-        : { input: `${pointer}/pause_ms`, min: pass.min * needed_ms, max: null, unit: "ms" },
+        : passesIfWithin(leverOn(`${pointer}/pause_ms`, "ms", Time_ms), {
+            min: pass.min * needed_ms,
+            max: null,
+          }),
     statement:
       `${acquisition.id} pauses for ${digits(pause_ms, 4)} ms; settling takes ${digits(settle_ms, 4)} ms and the flight ${digits(flight_ms, 4)} ms` +
       (previous === null
@@ -97,33 +89,28 @@ function settling(method: ResolvedMethod, { filterings }: ResolvedAcquisition, m
   return slowest;
 }
 
-/** Flight of the heaviest ion through the filters, and through every other stage whose residence is stated. */
+/** Flight of the heaviest ion through every stage: a product behind the collision cell. */
 function flight(
-  method: ResolvedMethod,
+  { stages }: ResolvedMethod,
   { filterings, cells }: ResolvedAcquisition,
   missing: string[],
 ): number {
-  let total_ms = 0;
+  const cell = stages.findIndex(({ stage }) => stage.role === "collision-cell");
   const heaviest = Math.max(...filterings.map(({ mz }) => mz));
-  const cell = method.stages.findIndex(({ stage }) => stage.role === "collision-cell");
-  const product = Math.max(...cells.map((each) => each.product?.mz ?? 0));
-  method.stages.forEach(({ stage, pointer }, index) => {
+  const product = Math.max(...cells.map((each) => each.product.mz));
+  let total_ms = 0;
+  stages.forEach(({ stage, pointer }, index) => {
     if (stage.role === "ion-trap") return;
-    const selects = filterings.some(({ filter }) => filter.pointer === pointer);
     const { residence, rodSet } = stage;
-    if (residence === undefined) {
-      if (selects) missing.push(`${pointer}/residence`);
-      return;
+    if (residence === undefined) missing.push(`${pointer}/residence`);
+    else if ("flightTime_us" in residence) total_ms += residence.flightTime_us / 1e3;
+    else if (rodSet === undefined) missing.push(`${pointer}/rodSet`);
+    else {
+      const mz = cell >= 0 && index > cell ? product : heaviest;
+      const time = flightTimeOf(residence, rodSet, mz);
+      if (time === null) missing.push(`${pointer}/rodSet/rodLength_mm`);
+      else total_ms += time * 1e3;
     }
-    if ("flightTime_us" in residence) {
-      total_ms += residence.flightTime_us / 1e3;
-      return;
-    }
-    const mz = cell >= 0 && index > cell ? product : heaviest;
-    const time = rodSet === undefined ? null : flightTimeOf(residence, rodSet, mz);
-    if (time === null)
-      missing.push(rodSet === undefined ? `${pointer}/rodSet` : `${pointer}/rodSet/rodLength_mm`);
-    else total_ms += time * 1e3;
   });
   return total_ms;
 }

@@ -1,8 +1,9 @@
 import { RF_ONLY_LIMIT_Q } from "../../physics/first-region.ts";
 import { defineCheck } from "../check.ts";
-import type { Bounds, PassesIf } from "../finding.ts";
+import type { Bounds } from "../finding.ts";
+import { passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
-import type { Observation } from "../observation.ts";
+import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
 import type { Guiding } from "../resolve/resolved-method.ts";
 import { digits } from "../statement.ts";
 
@@ -27,85 +28,56 @@ export const productAboveCutoff = defineCheck({
   examine: ({ acquisitions, guides }, limits) => {
     const pass = boundsOf(limits.pass);
     const caution = boundsOf(limits.caution);
+    const observe = (quantity: string, guiding: Guiding): Observation => {
+      const { acquisition, placed, product } = guiding;
+      const { pointer, ion } = product;
+      return {
+        quantity,
+        unit: "1",
+        subject: { pointer, acquisition: acquisition.id, stage: placed.stage.name, ion },
+        ...overCutoff(guiding, pass, caution),
+      };
+    };
     return [
-      ...guides.map((guide) => overCutoff(guide, "ion-over-cutoff", pass, caution)),
-      ...acquisitions.flatMap(({ cells }) =>
-        cells.map((cell) => overCutoff(cell, "product-over-cutoff", pass, caution)),
-      ),
+      ...guides.map((guide) => observe("ion-over-cutoff", guide)),
+      ...acquisitions.flatMap(({ cells }) => cells.map((cell) => observe("product-over-cutoff", cell))),
     ];
   },
 });
 
-function overCutoff(cell: Guiding, quantity: string, pass: Bounds, caution: Bounds): Observation {
-  const { stage } = cell.placed;
-  const product = cell.product!;
-  const about = {
-    quantity,
-    unit: "1",
-    subject: {
-      pointer: product.pointer,
-      acquisition: cell.acquisition.id,
-      stage: stage.name,
-      ion: product.ion,
-    },
+/** Below this q an ion is hardly held. */
+export const WEAK_CONFINEMENT_Q = 0.02;
+
+function overCutoff(guiding: Guiding, pass: Bounds, caution: Bounds): Reading {
+  const { placed, polePairs, product, cutoffMz, cutoffLever, evidence } = guiding;
+  const { name } = placed.stage;
+  if (polePairs > 2) {
+    return notApplicable(`${name} has ${polePairs} pole pairs; a sharp low-mass cutoff is defined for two.`);
+  }
+  if (cutoffMz === null) return lacking(`The low-mass cutoff of ${name}`, guiding.cutoffMissing);
+  const judged = {
+    evidence,
+    pass,
+    caution,
+    passesIf: () =>
+      pass.min === null || pass.min <= 0
+        ? null
+        : passesIfWithin(cutoffLever, {
+            min: cutoffMz === 0 ? (product.mz * WEAK_CONFINEMENT_Q) / RF_ONLY_LIMIT_Q : null,
+            max: product.mz / pass.min,
+          }),
   };
-  if (cell.polePairs > 2) {
-    return {
-      ...about,
-      kind: "not-applicable",
-      statement: `${stage.name} has ${cell.polePairs} pole pairs; a sharp low-mass cutoff is defined for two.`,
-    };
-  }
-  if (cell.cutoffMz === null) {
-    return {
-      ...about,
-      kind: "indeterminate",
-      missing: cell.cutoffMissing,
-      statement: `The low-mass cutoff of ${stage.name} does not follow without ${cell.cutoffMissing.join(", ")}.`,
-    };
-  }
   // Without RF nothing is confined, but then there is no cutoff either.
-  if (cell.cutoffMz === 0) {
-    return {
-      ...about,
-      kind: "impossible",
-      evidence: cell.evidence,
-      pass,
-      caution,
-      passesIf: null,
-      statement: `${stage.name} has no RF voltage: no ion is confined.`,
-    };
+  if (cutoffMz === 0) {
+    return { kind: "impossible", ...judged, statement: `${name} has no RF voltage: no ion is confined.` };
   }
-  const value = product.mz / cell.cutoffMz;
+  const value = product.mz / cutoffMz;
   const place =
     value < 1 ? "below the cutoff: the ion is lost there" : `${digits(value, 4)} times the cutoff`;
   return {
-    ...about,
     kind: "value",
     value,
-    evidence: cell.evidence,
-    pass,
-    caution,
-    passesIf: passesIfLower(cell, value, pass.min),
-    statement: `m/z ${product.mz} is ${place} (cutoff m/z ${digits(cell.cutoffMz, 5)}) in ${stage.name}.`,
+    ...judged,
+    statement: `m/z ${product.mz} is ${place} (cutoff m/z ${digits(cutoffMz, 5)}) in ${name}.`,
   };
-}
-
-/** The cutoff is proportional to every way in which the cell's RF can be set, so each input scales by the same factor. */
-function passesIfLower(cell: Guiding, value: number, min: number | null): PassesIf | null {
-  if (cell.setting === null || min === null) return null;
-  const { rf, pointer } = cell.setting;
-  const factor = value / min;
-  switch (rf.mode) {
-    case "fixed":
-      return { input: `${pointer}/rf/volts`, min: null, max: rf.rf.volts * factor, unit: "V" };
-    case "cutoff":
-      return { input: `${pointer}/mz`, min: null, max: rf.mz * factor, unit: "1" };
-    case "precursor-q":
-      return { input: `${pointer}/q`, min: null, max: rf.q * factor, unit: "1" };
-    case "product-q":
-      return { input: `${pointer}/q`, min: null, max: RF_ONLY_LIMIT_Q / min, unit: "1" };
-    case "table":
-      return { input: `${pointer}/points`, min: null, max: cell.cutoffMz! * factor, unit: "1" };
-  }
 }

@@ -1,12 +1,13 @@
-import { rfCyclesOf } from "../../contract/residence.ts";
+import { Residence, rfCyclesOf } from "../../contract/residence.ts";
 import { defineCheck } from "../check.ts";
-import type { PassesIf } from "../finding.ts";
-import type { MassFilterStage } from "../instrument.ts";
+import type { Bounds } from "../finding.ts";
+import { type Lever, leverOn, passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
-import type { Observation } from "../observation.ts";
-import type { Filtering, Placed, ResolvedMethod } from "../resolve/resolved-method.ts";
+import { lacking, notApplicable, type Reading } from "../observation.ts";
+import type { Filtering } from "../resolve/resolved-method.ts";
 import { centreOf, heightNote, standsForEdges, widthOf } from "../resolve/window.ts";
 import { digits } from "../statement.ts";
+import { settingsAt, worstOfStage } from "./worst-of-stage.ts";
 
 export const rfCycles = defineCheck({
   id: "rf-cycles",
@@ -21,101 +22,90 @@ export const rfCycles = defineCheck({
   defaults: { pass: { min: 20 }, caution: { min: 12.25 } },
   basis:
     "N^2 = hR with h = 20 (Austin, Holme and Leck in Dawson 1976, from memory) and h = 12.25 (Paul, Reinhard and von Zahn 1958, from memory); default limits, common practice.",
-  examine: (method, limits) =>
-    method.filters.map((filter) =>
-      worstOfStage(method, filter, boundsOf(limits.pass), boundsOf(limits.caution)),
-    ),
+  examine: (method, limits) => {
+    const pass = boundsOf(limits.pass);
+    const caution = boundsOf(limits.caution);
+    return method.filters.map((filter) =>
+      worstOfStage(
+        {
+          quantity: "cycles-squared-over-resolution",
+          unit: "1",
+          subject: { pointer: filter.pointer, stage: filter.stage.name },
+        },
+        settingsAt(method, filter),
+        `The method selects nothing in ${filter.stage.name}.`,
+        (setting) => cyclesSquaredOverResolution(setting, pass, caution),
+      ),
+    );
+  },
 });
 
-type Bounds = ReturnType<typeof boundsOf>;
-
-function worstOfStage(
-  method: ResolvedMethod,
-  filter: Placed<MassFilterStage>,
-  pass: Bounds,
-  caution: Bounds,
-): Observation {
-  const { stage, pointer } = filter;
-  const about = {
-    quantity: "cycles-squared-over-resolution",
-    unit: "1",
-    subject: { pointer, stage: stage.name },
-  };
-  const settings = method.acquisitions.flatMap(({ filterings }) =>
-    filterings.filter((each) => each.filter === filter),
-  );
-  if (settings.length === 0) {
-    return { ...about, kind: "not-applicable", statement: `The method selects nothing in ${stage.name}.` };
+function cyclesSquaredOverResolution(setting: Filtering, pass: Bounds, caution: Bounds): Reading {
+  const { window, filter, mz, setMz } = setting;
+  if (window.kind === "no-window") return notApplicable(window.reason);
+  const cycles = cyclesOf(setting);
+  const missing = [
+    ...cycles.missing,
+    ...(window.kind === "unknown" ? window.missing : []),
+    ...(window.kind === "window" && !standsForEdges(window, "narrow") ? [window.widthPointer] : []),
+  ];
+  if (window.kind === "unknown" || cycles.value === null || missing.length > 0) {
+    return lacking(`What the RF cycles in ${filter.stage.name} can resolve`, missing);
   }
-  const missing = new Set<string>();
-  let worst: { readonly value: number; readonly cycles: number; readonly at: Filtering } | null = null;
-  for (const setting of settings) {
-    const cycles = cyclesOf(filter, setting.mz, missing);
-    const resolution = resolutionOf(setting, missing);
-    if (cycles === null || resolution === null) continue;
-    const value = (cycles * cycles) / resolution;
-    if (worst === null || value < worst.value) worst = { value, cycles, at: setting };
-  }
-  if (worst === null || missing.size > 0) {
-    return {
-      ...about,
-      kind: "indeterminate",
-      missing: [...missing],
-      statement: `RF cycles of ${stage.name} against its resolution cannot be judged without ${[...missing].join(", ")}.`,
-    };
-  }
-  const { window } = worst.at;
+  const resolution = centreOf(window) / widthOf(window);
   return {
-    ...about,
     kind: "value",
-    subject: { ...about.subject, acquisition: worst.at.acquisition.id, ion: worst.at.ion },
-    value: worst.value,
-    evidence: window.kind === "window" && window.evidence === "stated" ? "stated" : "computed",
+    value: (cycles.value * cycles.value) / resolution,
+    evidence: window.evidence === "stated" ? "stated" : "computed",
     pass,
     caution,
-    passesIf: passesIfLonger(filter, worst.value, pass.min),
+    passesIf: () =>
+      pass.min === null
+        ? null
+        : passesIfWithin(cyclesLever(setting), { min: Math.sqrt(pass.min * resolution), max: null }),
     statement:
-      `${stage.name}: ${digits(worst.cycles, 4)} RF cycles at m/z ${worst.at.setMz} give N^2/R ${digits(worst.value, 3)}, the lowest of the method.` +
-      (window.kind === "window" ? heightNote(window) : ""),
+      `${filter.stage.name}: ${digits(cycles.value, 4)} RF cycles of m/z ${mz} give N^2/R ${digits((cycles.value * cycles.value) / resolution, 3)} at set m/z ${setMz}, the lowest of the method.` +
+      heightNote(window),
   };
 }
 
-function cyclesOf(filter: Placed<MassFilterStage>, mz: number, missing: Set<string>): number | null {
-  const { residence, rodSet } = filter.stage;
-  if (residence === undefined) missing.add(`${filter.pointer}/residence`);
-  if (residence !== undefined && "rfCycles" in residence) return residence.rfCycles;
-  if (rodSet === undefined) missing.add(`${filter.pointer}/rodSet`);
-  if (residence === undefined || rodSet === undefined) return null;
-  const cycles = rfCyclesOf(residence, rodSet, mz);
-  if (cycles === null) missing.add(`${filter.pointer}/rodSet/rodLength_mm`);
-  return cycles;
+interface Cycles {
+  readonly value: number | null;
+  readonly missing: readonly string[];
 }
 
-function resolutionOf({ window }: Filtering, missing: Set<string>): number | null {
-  if (window.kind === "unknown") for (const input of window.missing) missing.add(input);
-  if (window.kind !== "window") return null;
-  if (!standsForEdges(window, "narrow")) {
-    missing.add(window.widthPointer);
-    return null;
+function cyclesOf({ filter: { stage, pointer }, mz }: Filtering): Cycles {
+  const { residence, rodSet } = stage;
+  if (residence !== undefined && "rfCycles" in residence) return { value: residence.rfCycles, missing: [] };
+  if (residence === undefined || rodSet === undefined) {
+    const missing = [
+      ...(residence === undefined ? [`${pointer}/residence`] : []),
+      ...(rodSet === undefined ? [`${pointer}/rodSet`] : []),
+    ];
+    return { value: null, missing };
   }
-  return centreOf(window) / widthOf(window);
+  const value = rfCyclesOf(residence, rodSet, mz);
+  return { value, missing: value === null ? [`${pointer}/rodSet/rodLength_mm`] : [] };
 }
 
-function passesIfLonger(filter: Placed<MassFilterStage>, value: number, min: number | null): PassesIf | null {
-  const { residence } = filter.stage;
-  if (residence === undefined || min === null || value <= 0) return null;
-  const input = `${filter.pointer}/residence`;
-  const longer = Math.sqrt(min / value);
-  if ("rfCycles" in residence) {
-    return { input: `${input}/rfCycles`, min: residence.rfCycles * longer, max: null, unit: "1" };
-  }
+const [ByEnergy, ByTime, ByCycles] = Residence.options;
+
+/** The stated residence as the lever of the number of cycles; a slower ion stays for more of them. */
+function cyclesLever(setting: Filtering): Lever | null {
+  const { stage, pointer } = setting.filter;
+  const { residence } = stage;
+  const cycles = cyclesOf(setting).value;
+  if (residence === undefined || cycles === null || cycles === 0) return null;
+  const input = `${pointer}/residence`;
+  if ("rfCycles" in residence) return leverOn(`${input}/rfCycles`, "1", ByCycles.shape.rfCycles);
   if ("flightTime_us" in residence) {
-    return { input: `${input}/flightTime_us`, min: residence.flightTime_us * longer, max: null, unit: "us" };
+    const lever = leverOn(`${input}/flightTime_us`, "us", ByTime.shape.flightTime_us);
+    return { ...lever, inputFor: (wanted) => (residence.flightTime_us * wanted) / cycles };
   }
+  const energy = residence.axialEnergy_eVPerCharge;
   return {
-    input: `${input}/axialEnergy_eVPerCharge`,
-    min: null,
-    max: (residence.axialEnergy_eVPerCharge * value) / min,
-    unit: "eV",
+    ...leverOn(`${input}/axialEnergy_eVPerCharge`, "eV", ByEnergy.shape.axialEnergy_eVPerCharge),
+    falling: true,
+    inputFor: (wanted) => (energy * cycles * cycles) / (wanted * wanted),
   };
 }

@@ -1,8 +1,9 @@
 import { defineCheck, type Limits } from "../check.ts";
+import { passesIfWithin, passingInterval } from "../lever.ts";
 import { boundsOf, type Limit, UpperLimitByWidth } from "../limit.ts";
-import type { Observation } from "../observation.ts";
+import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
 import type { Filtering } from "../resolve/resolved-method.ts";
-import { heightNote, standsForEdges, widthOf } from "../resolve/window.ts";
+import { heightNote, standsForEdges, type Window, widthOf } from "../resolve/window.ts";
 import { digits } from "../statement.ts";
 import { eachIon } from "./each-ion.ts";
 
@@ -26,49 +27,55 @@ export const setMz = defineCheck({
       method,
       "set-against-ion",
       "states no set m/z, so the m/z of the ion itself is taken",
-      (filtering) => (filtering.setMzStated ? distance(filtering, limits) : null),
+      (filtering): Observation | null => {
+        const { setMzStated, setMzPointer, acquisition, filter, ion } = filtering;
+        if (!setMzStated) return null;
+        return {
+          quantity: "set-against-ion",
+          unit: "1",
+          subject: { pointer: setMzPointer, acquisition: acquisition.id, stage: filter.stage.name, ion },
+          ...setAgainstIon(filtering, limits),
+        };
+      },
     ),
 });
 
-function distance(filtering: Filtering, limits: Limits<Limit>): Observation {
-  const { window, filter, acquisition, ion, mz } = filtering;
-  const about = {
-    quantity: "set-against-ion",
-    unit: "1",
-    subject: { pointer: filtering.setMzPointer, acquisition: acquisition.id, stage: filter.stage.name, ion },
-  };
-  const needsWidth = limits.pass.maxOfWidth !== undefined || limits.caution.maxOfWidth !== undefined;
-  const usable = window.kind === "window" && standsForEdges(window, "narrow");
-  if (needsWidth && !usable) {
-    return {
-      ...about,
-      kind: "indeterminate",
-      missing:
-        window.kind === "unknown"
-          ? window.missing
-          : [window.kind === "empty" ? filter.pointer : window.widthPointer],
-      statement: `How far the set m/z may be from m/z ${mz} depends on the width of the window between its edges, which is not known.`,
-    };
+function setAgainstIon(filtering: Filtering, limits: Limits<Limit>): Reading {
+  const { window, filter, mz } = filtering;
+  const { name } = filter.stage;
+  const byWidth = limits.pass.maxOfWidth !== undefined || limits.caution.maxOfWidth !== undefined;
+  const width = widthBetweenEdges(window);
+  if (byWidth && width === undefined) {
+    if (window.kind === "no-window") return notApplicable(`${name} has no window here: ${window.reason}`);
+    const missing = window.kind === "unknown" ? window.missing : [window.widthPointer];
+    return lacking(`How far the set m/z of ${name} may be from m/z ${mz}`, missing);
   }
-  const width = usable ? widthOf(window) : undefined;
   const value = Math.abs(filtering.setMz - mz);
-  const pass = boundsOf(limits.pass, width);
   return {
-    ...about,
     kind: "value",
     value,
     evidence: "stated",
-    pass,
+    pass: boundsOf(limits.pass, width),
     caution: boundsOf(limits.caution, width),
-    passesIf:
-      pass.max === null
-        ? null
-        : { input: filtering.setMzPointer, min: mz - pass.max, max: mz + pass.max, unit: "1" },
+    passesIf: () => passesIfNearer(filtering, limits, value),
     statement:
-      `Set m/z ${filtering.setMz} is ${digits(value, 3)} from the ion's m/z ${mz} in ${filter.stage.name}` +
+      `Set m/z ${filtering.setMz} is ${digits(value, 3)} from the ion's m/z ${mz} in ${name}` +
       (width === undefined
         ? "."
         : `, ${digits(value / width, 2)} of the window's width ${digits(width, 3)}.`) +
-      (usable ? heightNote(window) : ""),
+      (window.kind === "window" && width !== undefined ? heightNote(window) : ""),
   };
+}
+
+function widthBetweenEdges(window: Window): number | undefined {
+  return window.kind === "window" && standsForEdges(window, "narrow") ? widthOf(window) : undefined;
+}
+
+/** The width, and with it the limit, goes along with the set m/z. */
+function passesIfNearer({ mz, setMzLever, windowIfSetTo }: Filtering, limits: Limits<Limit>, reach: number) {
+  const passes = (set: number) => {
+    const { max } = boundsOf(limits.pass, widthBetweenEdges(windowIfSetTo(set)));
+    return max === null || Math.abs(set - mz) <= max;
+  };
+  return passes(mz) ? passesIfWithin(setMzLever, passingInterval(passes, mz, mz - reach, mz + reach)) : null;
 }

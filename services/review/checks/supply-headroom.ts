@@ -4,12 +4,15 @@ import { setPointOf } from "../../physics/set-point.ts";
 import { defineCheck } from "../check.ts";
 import type { Bounds, Evidence } from "../finding.ts";
 import type { MassFilterStage, Stage, Supply } from "../instrument.ts";
+import { passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
-import type { Observation } from "../observation.ts";
+import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
 import type { Filtering, Guiding, Placed, ResolvedMethod } from "../resolve/resolved-method.ts";
+import { dcLever, rfLever } from "../resolve/volts-lever.ts";
 import { centreOf, standsForEdges, widthOf } from "../resolve/window.ts";
 import { digits } from "../statement.ts";
 import { ratedRange } from "./rated-range.ts";
+import { type InStage, settingsAt, worstOfStage } from "./worst-of-stage.ts";
 
 export const supplyHeadroom = defineCheck({
   id: "supply-headroom",
@@ -38,20 +41,18 @@ export const supplyHeadroom = defineCheck({
         ...filterHeadroom(method, filter, pass, caution),
         ...ratedRange(method, filter),
       ]),
-      ...cellHeadroom(method, pass, caution),
+      ...guidingHeadroom(method, pass, caution),
     ];
   },
 });
 
 type Axis = "rf" | "dc";
 
-/** A demand on a supply: how many canonical volts, for which ion, known how. */
-interface Demand {
-  readonly volts: number;
-  readonly evidence: Evidence;
-  readonly acquisition: string;
-  readonly ion: string;
-}
+/** Canonical volts that a setting needs, and how they are known. */
+type Demand =
+  | { readonly kind: "volts"; readonly volts: number; readonly evidence: Evidence }
+  | { readonly kind: "unknown"; readonly missing: readonly string[] }
+  | { readonly kind: "none" };
 
 function filterHeadroom(
   method: ResolvedMethod,
@@ -62,154 +63,142 @@ function filterHeadroom(
   const { supply, rated } = filter.stage;
   // A rated range answers the same question where the amplifier's limits are not known.
   if (supply === undefined && rated !== undefined) return [];
-  const settings = method.acquisitions.flatMap(({ filterings }) =>
-    filterings.filter((each) => each.filter === filter),
+  const settings = settingsAt(method, filter);
+  return (["rf", "dc"] as const).map((axis) =>
+    headroom(filter, supply, axis, settings, (setting) => filterDemand(setting, axis), pass, caution),
   );
-  return (["rf", "dc"] as const).map((axis) => {
-    const missing = new Set<string>();
-    const demands = settings.flatMap((setting) => filterDemand(setting, axis, missing) ?? []);
-    return headroom(filter, supply, axis, demands, missing, pass, caution);
-  });
 }
 
-function filterDemand(setting: Filtering, axis: Axis, missing: Set<string>): Demand | null {
-  const { window, filter, acquisition, ion } = setting;
-  const demand = (volts: number, evidence: Evidence): Demand => ({
-    volts,
-    evidence,
-    acquisition: acquisition.id,
-    ion,
-  });
-  if (window.kind === "unknown") {
-    for (const input of window.missing) missing.add(input);
-    return null;
-  }
+function filterDemand({ window, filter }: Filtering, axis: Axis): Demand {
+  if (window.kind === "unknown") return { kind: "unknown", missing: window.missing };
   if (window.drive !== null) {
     const { rfVolts, dcVolts } = window.drive.volts;
-    return demand(axis === "rf" ? rfVolts : dcVolts, "computed");
+    return { kind: "volts", volts: axis === "rf" ? rfVolts : Math.max(dcVolts, 0), evidence: "computed" };
   }
-  if (window.kind === "empty") return null;
-  if (filter.stage.rodSet === undefined) {
-    missing.add(`${filter.pointer}/rodSet`);
-    return null;
-  }
-  // A narrower window needs the higher DC, so only a width that is not the wider one may stand in.
-  if (!standsForEdges(window, "narrow")) {
-    missing.add(window.widthPointer);
-    return null;
-  }
-  const solved = setPointOf(centreOf(window), widthOf(window), fieldOf(filter.stage.rodSet));
-  if (solved.kind !== "set-point") {
-    missing.add(window.widthPointer);
-    return null;
-  }
-  return demand(
-    axis === "rf" ? solved.rfVolts : solved.dcVolts,
-    window.evidence === "stated" ? "stated" : "computed",
-  );
+  if (window.kind === "no-window") return { kind: "none" };
+  const { rodSet } = filter.stage;
+  const missing = [
+    ...(rodSet === undefined ? [`${filter.pointer}/rodSet`] : []),
+    // A narrower window needs the higher DC, so only a width that is not the wider one may stand in.
+    ...(standsForEdges(window, "narrow") ? [] : [window.widthPointer]),
+  ];
+  if (rodSet === undefined || missing.length > 0) return { kind: "unknown", missing };
+  const solved = setPointOf(centreOf(window), widthOf(window), fieldOf(rodSet));
+  if (solved.kind !== "set-point") return { kind: "unknown", missing: [window.widthPointer] };
+  return {
+    kind: "volts",
+    volts: axis === "rf" ? solved.rfVolts : solved.dcVolts,
+    evidence: window.evidence === "stated" ? "stated" : "computed",
+  };
 }
 
-function cellHeadroom(method: ResolvedMethod, pass: Bounds, caution: Bounds): Observation[] {
-  const cells = method.acquisitions.flatMap(({ cells }) => cells);
-  const first = cells[0];
-  if (first === undefined || !("supply" in first.placed.stage) || first.placed.stage.supply === undefined)
-    return [];
-  const missing = new Set<string>();
-  const demands = cells.flatMap((cell) => cellDemand(cell, missing) ?? []);
-  return [headroom(first.placed, first.placed.stage.supply as Supply, "rf", demands, missing, pass, caution)];
+/** Cells and guides whose supply is stated: RF alone. */
+function guidingHeadroom(method: ResolvedMethod, pass: Bounds, caution: Bounds): Observation[] {
+  const guidings = [...method.guides, ...method.acquisitions.flatMap(({ cells }) => cells)];
+  return method.stages.flatMap((placed) => {
+    const { stage, pointer } = placed;
+    const here = guidings.filter((guiding) => guiding.placed.pointer === pointer);
+    if (here.length === 0 || stage.role === "ion-trap" || stage.supply === undefined) return [];
+    const settings = here.map((guiding) => ({
+      acquisition: guiding.acquisition,
+      ion: guiding.product.ion,
+      guiding,
+    }));
+    return [
+      headroom(placed, stage.supply, "rf", settings, ({ guiding }) => guidingDemand(guiding), pass, caution),
+    ];
+  });
 }
 
-function cellDemand(cell: Guiding, missing: Set<string>): Demand | null {
-  if (cell.rfVolts === null) {
-    for (const input of cell.rfMissing) missing.add(input);
-    return null;
-  }
-  const ion = (cell.product ?? cell.precursor)?.ion ?? "";
-  return { volts: cell.rfVolts, evidence: cell.evidence, acquisition: cell.acquisition.id, ion };
+function guidingDemand({ rfVolts, rfMissing, evidence }: Guiding): Demand {
+  if (rfVolts === null) return { kind: "unknown", missing: rfMissing };
+  return { kind: "volts", volts: rfVolts, evidence };
 }
 
-function headroom(
+function headroom<Setting extends InStage>(
   placed: Placed<Stage>,
   supply: Supply | undefined,
   axis: Axis,
-  demands: readonly Demand[],
-  missing: ReadonlySet<string>,
+  settings: readonly Setting[],
+  demandOf: (setting: Setting) => Demand,
   pass: Bounds,
   caution: Bounds,
 ): Observation {
-  const member = axis === "rf" ? "rfMax" : "dcMax";
-  const pointer = `${placed.pointer}/supply/${member}`;
-  const about = {
-    quantity: `${axis}-headroom`,
-    unit: "%",
-    subject: { pointer: placed.pointer, stage: placed.stage.name },
-  };
-  const largest = largestVolts(supply, axis);
-  const lacking = [
-    ...(largest === null ? [supply === undefined ? `${placed.pointer}/supply` : pointer] : []),
-    ...missing,
-  ];
-  if (demands.length === 0 && lacking.length === 0) {
-    return {
-      ...about,
-      kind: "not-applicable",
-      statement: `The method asks no ${axis.toUpperCase()} of ${placed.stage.name}.`,
-    };
-  }
-  if (largest === null || lacking.length > 0) {
-    return {
-      ...about,
-      kind: "indeterminate",
-      missing: lacking,
-      statement: `The ${axis.toUpperCase()} headroom of ${placed.stage.name} does not follow without ${lacking.join(", ")}.`,
-    };
-  }
-  const worst = demands.reduce((best, demand) => (demand.volts > best.volts ? demand : best));
-  const subject = { ...about.subject, acquisition: worst.acquisition, ion: worst.ion };
-  if (largest === 0) {
-    return {
-      ...about,
-      kind: "impossible",
-      subject,
-      evidence: worst.evidence,
+  const { name } = placed.stage;
+  const label = axis.toUpperCase();
+  const largest = largestOf(supply, axis, `${placed.pointer}/supply`);
+  const read = (setting: Setting): Reading => {
+    const demand = demandOf(setting);
+    if (demand.kind === "none") return notApplicable(`Nothing passes ${name}.`);
+    const missing = [
+      ...("missing" in largest ? largest.missing : []),
+      ...(demand.kind === "unknown" ? demand.missing : []),
+    ];
+    if ("missing" in largest || demand.kind === "unknown")
+      return lacking(`The ${label} headroom of ${name}`, missing);
+    return headroomOver(
+      demand,
+      largest,
       pass,
       caution,
-      passesIf: null,
-      statement: `The supply of ${placed.stage.name} is stated to reach 0 V.`,
-    };
-  }
-  const value = (100 * (largest - worst.volts)) / largest;
-  const stated = statedLargest(supply, axis);
-  return {
-    ...about,
-    kind: "value",
-    subject,
-    value,
-    evidence: worst.evidence,
+      (needed, reached) =>
+        `${name} needs ${needed} V ${label} for ${setting.ion} of ${setting.acquisition.id}; the supply reaches ${reached} V in the same reading.`,
+    );
+  };
+  return worstOfStage(
+    { quantity: `${axis}-headroom`, unit: "%", subject: { pointer: placed.pointer, stage: name } },
+    settings,
+    `The method asks no ${label} of ${name}.`,
+    read,
+  );
+}
+
+function headroomOver(
+  { volts, evidence }: Extract<Demand, { kind: "volts" }>,
+  { largest, lever, statedFor }: Largest,
+  pass: Bounds,
+  caution: Bounds,
+  sentence: (needed: string, reached: string) => string,
+): Reading {
+  const judged = {
+    evidence,
     pass,
     caution,
-    passesIf:
+    passesIf: () =>
       pass.min === null || pass.min >= 100
         ? null
-        : {
-            input: `${pointer}/volts`,
-            min: ((worst.volts / largest) * stated) / (1 - pass.min / 100),
-            max: null,
-            unit: "V",
-          },
-    statement:
-      `${placed.stage.name} needs ${digits((worst.volts / largest) * stated, 5)} V ${axis.toUpperCase()} for ${worst.ion} of ` +
-      `${worst.acquisition}; the supply reaches ${digits(stated, 5)} V in the same reading.`,
+        : passesIfWithin(lever, { min: volts / (1 - pass.min / 100), max: null }),
+    statement: sentence(digits(statedFor(volts), 5), digits(statedFor(largest), 5)),
   };
+  if (largest === 0) return { kind: "impossible", ...judged };
+  return { kind: "value", value: (100 * (largest - volts)) / largest, ...judged };
 }
 
-function largestVolts(supply: Supply | undefined, axis: Axis): number | null {
-  if (axis === "rf") return supply?.rfMax === undefined ? null : rfToCanonical(supply.rfMax);
-  return supply?.dcMax === undefined ? null : dcToCanonical(supply.dcMax).dcVolts;
+interface Largest {
+  readonly largest: number;
+  readonly lever: ReturnType<typeof rfLever>;
+  /** Canonical volts in the reading of the supply's statement, without its sign. */
+  readonly statedFor: (volts: number) => number;
 }
 
-function statedLargest(supply: Supply | undefined, axis: Axis): number {
-  if (axis === "rf") return supply!.rfMax!.volts;
-  const largest = supply!.dcMax!;
-  return "volts" in largest ? Math.abs(largest.volts) : Math.abs(largest.pairX_V - largest.pairY_V) / 2;
+function largestOf(
+  supply: Supply | undefined,
+  axis: Axis,
+  pointer: string,
+): Largest | { readonly missing: readonly string[] } {
+  if (supply === undefined) return { missing: [pointer] };
+  if (axis === "rf") {
+    const { rfMax } = supply;
+    if (rfMax === undefined) return { missing: [`${pointer}/rfMax`] };
+    const lever = rfLever(rfMax, `${pointer}/rfMax`);
+    return { largest: rfToCanonical(rfMax), lever, statedFor: lever.inputFor };
+  }
+  const { dcMax } = supply;
+  if (dcMax === undefined) return { missing: [`${pointer}/dcMax`] };
+  const factor = "volts" in dcMax && dcMax.between === "pole-and-pole" ? 2 : 1;
+  return {
+    largest: dcToCanonical(dcMax).dcVolts,
+    lever: dcLever(dcMax, `${pointer}/dcMax`),
+    statedFor: (volts) => volts * factor,
+  };
 }

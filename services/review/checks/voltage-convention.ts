@@ -1,15 +1,18 @@
-import { rfFromCanonical } from "../../contract/drive.ts";
+import { rfFromCanonical, rfToCanonical } from "../../contract/drive.ts";
 import { fieldOf } from "../../contract/rod-set.ts";
 import { APEX_Q } from "../../physics/first-region.ts";
-import { mzOf } from "../../physics/mathieu-parameters.ts";
+import { mzOf, rfVoltsOf } from "../../physics/mathieu-parameters.ts";
 import { defineCheck } from "../check.ts";
-import type { Bounds, PassesIf } from "../finding.ts";
+import type { Bounds } from "../finding.ts";
 import type { MassFilterStage } from "../instrument.ts";
+import { type Lever, leverThrough, passesIfWithin } from "../lever.ts";
 import { boundsOf, TwoSidedLimit } from "../limit.ts";
-import type { Observation } from "../observation.ts";
-import { voltsAt } from "../resolve/operating-point.ts";
+import { lacking, notApplicable, type Observation } from "../observation.ts";
 import type { Placed, ResolvedMethod } from "../resolve/resolved-method.ts";
+import { rfLever } from "../resolve/volts-lever.ts";
 import { digits } from "../statement.ts";
+import { causesOf } from "./mistaken-convention.ts";
+import { settingsAt } from "./worst-of-stage.ts";
 
 export const voltageConvention = defineCheck({
   id: "voltage-convention",
@@ -34,35 +37,6 @@ export const voltageConvention = defineCheck({
     ),
 });
 
-/**
- * What multiplies the m/z at the apex when one thing is mistaken for another. m/z is proportional to V / (f r0)^2.
- */
-const MISTAKES: readonly { readonly factor: number; readonly cause: string }[] = [
-  { factor: 2, cause: "the RF is peak-to-peak but stated as zero-to-peak" },
-  { factor: 2, cause: "the RF is between the poles but stated between pole and ground" },
-  { factor: 0.5, cause: "the RF is zero-to-peak but stated as peak-to-peak" },
-  { factor: 0.5, cause: "the RF is between pole and ground but stated between the poles" },
-  {
-    factor: 4,
-    cause: "the RF is peak-to-peak between the poles but stated as zero-to-peak between pole and ground",
-  },
-  {
-    factor: 0.25,
-    cause: "the RF is zero-to-peak between pole and ground but stated as peak-to-peak between the poles",
-  },
-  { factor: 0.25, cause: "the field diameter is stated as the field radius" },
-  { factor: Math.SQRT2, cause: "the RF is zero-to-peak but stated as rms" },
-  { factor: Math.SQRT1_2, cause: "the RF is rms but stated as zero-to-peak" },
-  { factor: 2 * Math.SQRT2, cause: "the RF is peak-to-peak but stated as rms" },
-  { factor: Math.SQRT1_2 / 2, cause: "the RF is rms but stated as peak-to-peak" },
-  { factor: 0.76, cause: "the rod radius is stated as the field radius" },
-  { factor: 1.32, cause: "the field radius was reduced as if it were a rod radius" },
-  { factor: 1 / (4 * Math.PI * Math.PI), cause: "the angular frequency is stated as the frequency" },
-  { factor: 4 * Math.PI * Math.PI, cause: "the frequency was divided by 2 pi" },
-];
-
-const RECOGNISED_WITHIN = 0.03;
-
 function apexOverTarget(
   method: ResolvedMethod,
   filter: Placed<MassFilterStage>,
@@ -73,96 +47,83 @@ function apexOverTarget(
   const pointer = `${filter.pointer}/operatingPoint`;
   const about = { quantity: "apex-over-target", unit: "1", subject: { pointer, stage: name } };
   if (operatingPoint?.by !== "drives" && operatingPoint?.by !== "drive-law") {
-    return {
-      ...about,
-      kind: "not-applicable",
-      statement: `No voltage of ${name} is stated, so none can be misread.`,
-    };
+    return { ...about, ...notApplicable(`No voltage of ${name} is stated, so none can be misread.`) };
   }
   if (rodSet === undefined) {
-    return {
-      ...about,
-      kind: "indeterminate",
-      missing: [`${filter.pointer}/rodSet`],
-      statement: `The voltages of ${name} cannot be compared with m/z without its rod set.`,
-    };
+    return { ...about, ...lacking(`What m/z the voltages of ${name} select`, [`${filter.pointer}/rodSet`]) };
   }
-  const target = heaviestTarget(method, filter, operatingPoint);
-  const setting = target === null ? null : voltsAt(operatingPoint, target.mz);
-  if (target === null || setting === null) {
-    return { ...about, kind: "not-applicable", statement: `The method sets no m/z in ${name}.` };
-  }
-  const value = mzOf(APEX_Q, setting.volts.rfVolts, fieldOf(rodSet)) / target.mz;
-  const stated = rfFromCanonical(setting.volts.rfVolts, setting.convention.rf);
+  const target =
+    operatingPoint.by === "drives"
+      ? heaviestPoint(operatingPoint, pointer)
+      : heaviestSetting(method, filter, operatingPoint, pointer);
+  if (target === null) return { ...about, ...notApplicable(`The method sets no m/z in ${name}.`) };
+  const { rfVolts, mz, rf, lever } = target;
+  const field = fieldOf(rodSet);
+  const value = mzOf(APEX_Q, rfVolts, field) / mz;
+  const agrees = (pass.min === null || value >= pass.min) && (pass.max === null || value <= pass.max);
   return {
     ...about,
     kind: "value",
-    subject: { ...about.subject, pointer: target.pointer, ion: `m/z ${target.mz}` },
+    subject: { ...about.subject, pointer: target.pointer, ion: `m/z ${mz}` },
     value,
     evidence: "computed",
     pass,
     caution,
-    passesIf: passesIfRead(target.voltsPointer, target.voltsPerUnit ?? stated.volts, value, pass),
+    passesIf: () =>
+      passesIfWithin(
+        leverThrough(lever, (ratio) => rfVoltsOf(ratio * mz, APEX_Q, field)),
+        pass,
+      ),
     statement:
-      `${digits(stated.volts, 6)} V ${stated.as}, ${stated.between}, puts m/z ${digits(value * target.mz, 5)} at the apex in ${name}; it is stated for m/z ${target.mz}.` +
-      causesOf(value, pass),
+      `${digits(rfFromCanonical(rfVolts, rf).volts, 6)} V ${rf.as}, ${rf.between}, puts m/z ${digits(value * mz, 5)} at the apex in ${name}; it is stated for m/z ${mz}.` +
+      (agrees ? "" : causesText(value, causesOf(value, rf))),
   };
+}
+
+function causesText(value: number, causes: readonly string[]): string {
+  return causes.length === 0
+    ? ` The factor of ${digits(value, 4)} fits no mistaken convention that is known here.`
+    : ` A factor of ${digits(value, 4)} comes about when ${causes.join(", or when ")}.`;
 }
 
 interface Target {
   readonly mz: number;
+  readonly rfVolts: number;
   readonly pointer: string;
-  readonly voltsPointer: string;
-  readonly voltsPerUnit: number | null;
+  readonly rf: Parameters<typeof rfLever>[0];
+  readonly lever: Lever;
 }
 
-/** The heaviest point is judged: the window's centre leaves the apex where the resolution is low, which is at light ions. */
-function heaviestTarget(
+type OperatingPointBy<By extends string> = Extract<MassFilterStage["operatingPoint"], { by: By }>;
+
+/*
+ * The heaviest is judged: the window's centre leaves the apex where the resolution is low, which is at light ions.
+ */
+
+function heaviestPoint({ points }: OperatingPointBy<"drives">, pointer: string): Target {
+  const index = points.reduce((best, point, each) => (point.mz > points[best]!.mz ? each : best), 0);
+  const { mz, drive } = points[index]!;
+  const { rf } = drive;
+  const own = `${pointer}/points/${index}`;
+  return { mz, rfVolts: rfToCanonical(rf), pointer: own, rf, lever: rfLever(rf, `${own}/drive/rf`) };
+}
+
+function heaviestSetting(
   method: ResolvedMethod,
   filter: Placed<MassFilterStage>,
-  operatingPoint: Extract<NonNullable<MassFilterStage["operatingPoint"]>, { by: "drives" | "drive-law" }>,
+  { rfPerMz }: OperatingPointBy<"drive-law">,
+  pointer: string,
 ): Target | null {
-  const pointer = `${filter.pointer}/operatingPoint`;
-  if (operatingPoint.by === "drives") {
-    const index = operatingPoint.points.reduce(
-      (best, point, each) => (point.mz > operatingPoint.points[best]!.mz ? each : best),
-      0,
-    );
-    return {
-      mz: operatingPoint.points[index]!.mz,
-      pointer: `${pointer}/points/${index}`,
-      voltsPointer: `${pointer}/points/${index}/drive/rf/volts`,
-      voltsPerUnit: null,
-    };
-  }
-  const set = method.acquisitions.flatMap(({ filterings }) =>
-    filterings.filter((filtering) => filtering.filter === filter).map(({ setMz }) => setMz),
-  );
+  const set = settingsAt(method, filter).map(({ setMz }) => setMz);
   if (set.length === 0) return null;
+  const mz = Math.max(...set);
+  const own = `${pointer}/rfPerMz`;
+  const lever = rfLever(rfPerMz, own);
   return {
-    mz: Math.max(...set),
-    pointer: `${pointer}/rfPerMz`,
-    voltsPointer: `${pointer}/rfPerMz/volts`,
-    voltsPerUnit: operatingPoint.rfPerMz.volts,
-  };
-}
-
-function causesOf(value: number, pass: Bounds): string {
-  if ((pass.min === null || value >= pass.min) && (pass.max === null || value <= pass.max)) return "";
-  const causes = MISTAKES.filter(({ factor }) => Math.abs(value / factor - 1) <= RECOGNISED_WITHIN).map(
-    ({ cause }) => cause,
-  );
-  if (causes.length === 0)
-    return ` The factor of ${digits(value, 4)} fits no mistaken convention that is known here.`;
-  return ` A factor of ${digits(value, 4)} comes about when ${causes.join(", or when ")}.`;
-}
-
-function passesIfRead(input: string, volts: number, value: number, pass: Bounds): PassesIf | null {
-  if (value <= 0) return null;
-  return {
-    input,
-    min: pass.min === null ? null : (volts * pass.min) / value,
-    max: pass.max === null ? null : (volts * pass.max) / value,
-    unit: "V",
+    mz,
+    rfVolts: rfToCanonical(rfPerMz) * mz,
+    pointer: own,
+    rf: rfPerMz,
+    lever: { ...lever, inputFor: (volts) => lever.inputFor(volts / mz) },
   };
 }

@@ -1,11 +1,14 @@
 import { widthInMz } from "../../contract/width.ts";
 import { defineCheck, type Limits } from "../check.ts";
+import { passesIfWithin } from "../lever.ts";
 import { boundsOf, type Limit, UpperLimit } from "../limit.ts";
-import type { Observation } from "../observation.ts";
+import type { Observation, Reading } from "../observation.ts";
+import { type Claim, claimedWidthLever } from "../resolve/operating-point.ts";
 import type { Filtering } from "../resolve/resolved-method.ts";
 import { widthOf } from "../resolve/window.ts";
 import { digits } from "../statement.ts";
 import { eachIon } from "./each-ion.ts";
+import { passesIfDcChanges } from "./window-that-passes.ts";
 
 export const windowWidth = defineCheck({
   id: "window-width",
@@ -29,64 +32,71 @@ export const windowWidth = defineCheck({
       method,
       "width-against-claim",
       "claims no width that the instrument's own could be held against",
-      (filtering) => difference(filtering, limits),
+      (filtering): Observation | null => {
+        const { claim, filter, pointer, acquisition, ion } = filtering;
+        // A width that is only claimed agrees with itself, which shows nothing.
+        if (claim === null || filter.stage.operatingPoint?.by === "stated") return null;
+        return {
+          quantity: "width-against-claim",
+          unit: "1",
+          subject: { pointer, acquisition: acquisition.id, stage: filter.stage.name, ion },
+          ...againstClaim(filtering, claim, limits),
+        };
+      },
       ["ion", "scan-end"],
     ),
 });
 
-function difference(filtering: Filtering, limits: Limits<Limit>): Observation | null {
-  const { window, filter, acquisition, claim, ion } = filtering;
-  // A width that is only claimed agrees with itself, which shows nothing.
-  if (claim === null || filter.stage.operatingPoint?.by === "stated") return null;
-  const about = {
-    quantity: "width-against-claim",
-    unit: "1",
-    subject: { pointer: filtering.pointer, acquisition: acquisition.id, stage: filter.stage.name, ion },
-  };
+function againstClaim(filtering: Filtering, claim: Claim, limits: Limits<Limit>): Reading {
+  const { window, filter, setMz } = filtering;
+  const { name } = filter.stage;
   const pass = boundsOf(limits.pass);
   const caution = boundsOf(limits.caution);
+  const claimed = widthInMz(claim.width, setMz);
   if (window.kind === "unknown") {
-    return { ...about, kind: "indeterminate", missing: window.missing, statement: window.reason };
+    return { kind: "indeterminate", missing: window.missing, statement: window.reason };
   }
-  if (window.kind === "empty") {
+  if (window.kind === "no-window") {
     return {
-      ...about,
       kind: "impossible",
       evidence: window.evidence,
       pass,
       caution,
-      passesIf: null,
-      statement: `${filter.stage.name}: ${window.reason}`,
+      passesIf: () =>
+        passesIfDcChanges(
+          filtering,
+          (open) =>
+            open.kind === "window" &&
+            claim.width.at === "edges" &&
+            (pass.max === null || Math.abs(widthOf(open) - claimed) <= pass.max),
+        ),
+      statement: `${name}: ${window.reason}`,
     };
   }
   if (window.height !== claim.width.at) {
     return {
-      ...about,
       kind: "indeterminate",
       missing: [`${claim.pointer}/at`],
       statement: `The method claims a width at ${claim.width.at}, the instrument's is known at ${window.height}; the two differ and are not compared.`,
     };
   }
-  const claimed = widthInMz(claim.width, filtering.setMz);
   const observed = widthOf(window);
   return {
-    ...about,
     kind: "value",
     value: Math.abs(observed - claimed),
     evidence: window.evidence,
     pass,
     caution,
-    passesIf:
+    passesIf: () =>
       pass.max === null
         ? null
-        : {
-            input: claim.pointer,
-            min: Math.max(observed - pass.max, 0),
+        : passesIfWithin(claimedWidthLever(claim.width, `${claim.pointer}/value`, setMz), {
+            // Smaller than any claim that a request can make.
+            min: Math.max(observed - pass.max, 1e-9),
             max: observed + pass.max,
-            unit: "1",
-          },
+          }),
     statement:
-      `At m/z ${filtering.setMz} ${filter.stage.name} is ${digits(observed, 4)} wide at ${window.height}; the method claims ${digits(claimed, 4)}.` +
+      `At m/z ${setMz} ${name} is ${digits(observed, 4)} wide at ${window.height}; the method claims ${digits(claimed, 4)}.` +
       (window.note === null ? "" : ` ${window.note}`),
   };
 }

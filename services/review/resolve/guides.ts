@@ -14,22 +14,26 @@ function isGuide(placed: Placed<Stage>): placed is Placed<Guide> {
 
 /**
  * Every guide with the lightest ion that the method sends through it, which is the first that a cutoff would take away:
- * a precursor before the collision cell, a product behind it.
+ * of a transition the precursor before the collision cell and the product behind it, of a single selection its ion.
  */
 export function guidesOf(
   stages: readonly Placed<Stage>[],
   acquisitions: readonly ResolvedAcquisition[],
 ): Guiding[] {
+  const order = new Map(stages.map(({ pointer }, index) => [pointer, index]));
   const cell = stages.findIndex(({ stage }) => stage.role === "collision-cell");
-  const isBehindCell = (pointer: string) =>
-    cell >= 0 && stages.findIndex((each) => each.pointer === pointer) > cell;
-  const filterings = acquisitions.flatMap((each) => each.filterings);
+  const isBehindCell = (pointer: string) => cell >= 0 && order.get(pointer)! > cell;
   return stages.filter(isGuide).flatMap((guide) => {
     const behind = isBehindCell(guide.pointer);
-    const through = filterings.filter(({ filter }) => isBehindCell(filter.pointer) === behind);
-    if (through.length === 0) return [];
-    const lightest = through.reduce((best, each) => (each.mz < best.mz ? each : best));
-    return [guideOf(guide, lightest)];
+    let lightest: Filtering | null = null;
+    for (const { acquisition, filterings } of acquisitions) {
+      const single = acquisition.kind === "scan" || acquisition.kind === "selected-ion";
+      for (const each of filterings) {
+        if (!single && isBehindCell(each.filter.pointer) !== behind) continue;
+        if (lightest === null || each.mz < lightest.mz) lightest = each;
+      }
+    }
+    return lightest === null ? [] : [guideOf(guide, lightest)];
   });
 }
 

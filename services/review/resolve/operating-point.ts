@@ -1,13 +1,11 @@
-import { conventionOf, driveToCanonical, rfToCanonical } from "../../contract/drive.ts";
-import { fieldOf } from "../../contract/rod-set.ts";
-import { type Width, widthInMz } from "../../contract/width.ts";
+import { fieldOf, type RodSet } from "../../contract/rod-set.ts";
+import { Width, widthInMz } from "../../contract/width.ts";
 import { passbandOf } from "../../physics/passband.ts";
-import type { MassFilterStage, OperatingPoint } from "../instrument.ts";
-import { interpolate } from "./interpolate.ts";
+import type { MassFilterStage } from "../instrument.ts";
+import { windowsBetweenPeaks } from "./measured-peaks.ts";
 import type { Placed } from "./resolved-method.ts";
+import { lineByLaw, lineThroughPoints, type SupplyLine } from "./supply-line.ts";
 import type { Window, WindowDrive } from "./window.ts";
-
-type Of<By extends OperatingPoint["by"]> = Extract<OperatingPoint, { by: By }>;
 
 /** A claim of the method on the width of a window, and where it stands. */
 export interface Claim {
@@ -16,178 +14,123 @@ export interface Claim {
 }
 
 /** What a mass filter lets through when it is set to this m/z. */
-export function windowAt(filter: Placed<MassFilterStage>, setMz: number, claim: Claim | null): Window {
-  const { operatingPoint } = filter.stage;
+export type WindowSource = (setMz: number, claim: Claim | null) => Window;
+
+/** The windows of a mass filter at every set m/z, worked out once for all that the method sets there. */
+export function windowsOf(filter: Placed<MassFilterStage>): WindowSource {
+  const { operatingPoint, rodSet } = filter.stage;
   const pointer = `${filter.pointer}/operatingPoint`;
   switch (operatingPoint?.by) {
     case "measured-peaks":
-      return measuredWindow(operatingPoint, setMz, pointer);
+      return windowsBetweenPeaks(operatingPoint, pointer);
     case "drives":
     case "drive-law": {
-      const setting = voltsAt(operatingPoint, setMz);
-      if (setting === null) {
-        return {
-          kind: "unknown",
-          missing: [`${pointer}/points`],
-          reason: `The only drive point is not at m/z ${setMz}; a second point gives the line between them.`,
-        };
-      }
-      return computedWindow(filter, setting, pointer);
+      const line = supplyLineOf(filter)!;
+      if (rodSet !== undefined) return (setMz) => windowOnLine(line, setMz, rodSet, pointer);
+      const unknown: Window = {
+        kind: "unknown",
+        missing: [`${filter.pointer}/rodSet`],
+        reason: "The volts say nothing of a window without the rods.",
+      };
+      return () => unknown;
     }
-    case "stated":
-      return statedWindow(claim ?? { width: operatingPoint.width, pointer: `${pointer}/width` }, setMz);
+    case "stated": {
+      const { width } = operatingPoint;
+      return (setMz, claim) => statedWindow(claim ?? { width, pointer: `${pointer}/width` }, setMz);
+    }
+    default: {
+      const unknown: Window = {
+        kind: "unknown",
+        missing: [pointer],
+        reason: "No operating point is stated.",
+      };
+      return () => unknown;
+    }
+  }
+}
+
+/** The volts of a mass filter at every set m/z, null where its operating point states none. */
+export function supplyLineOf({
+  stage: { operatingPoint },
+  pointer,
+}: Placed<MassFilterStage>): SupplyLine | null {
+  switch (operatingPoint?.by) {
+    case "drives":
+      return lineThroughPoints(operatingPoint, `${pointer}/operatingPoint`);
+    case "drive-law":
+      return lineByLaw(operatingPoint, `${pointer}/operatingPoint`);
     default:
-      return { kind: "unknown", missing: [pointer], reason: "No operating point is stated." };
+      return null;
   }
 }
 
-function measuredWindow({ peaks }: Of<"measured-peaks">, setMz: number, pointer: string): Window {
-  const sorted = peaks
-    .map((peak, index) => ({ ...peak, index, width_mz: widthInMz(peak.width, peak.observedMz) }))
-    .sort((one, other) => one.setMz - other.setMz);
-  const heights = new Set(sorted.map((peak) => peak.width.at));
-  if (heights.size > 1) {
-    return {
-      kind: "unknown",
-      missing: [`${pointer}/peaks`],
-      reason:
-        "The widths of the peaks are taken at different heights; one line through them needs one height.",
-    };
-  }
-  const shift = interpolate(
-    sorted.map((peak) => ({ x: peak.setMz, y: peak.observedMz - peak.setMz })),
-    setMz,
-    "hold",
-  );
-  const width = interpolate(
-    sorted.map((peak) => ({ x: peak.setMz, y: peak.width_mz })),
-    setMz,
-    "hold",
-  );
-  const nearest = sorted.reduce((best, peak) =>
-    Math.abs(peak.setMz - setMz) < Math.abs(best.setMz - setMz) ? peak : best,
-  );
-  const centre = setMz + shift.value;
-  return {
-    kind: "window",
-    mzLow: centre - width.value / 2,
-    mzHigh: centre + width.value / 2,
-    height: sorted[0]!.width.at,
-    evidence: "measured",
-    drive: null,
-    note: shift.outside
-      ? `m/z ${setMz} lies outside the measured peaks (${sorted[0]!.setMz} to ${sorted[sorted.length - 1]!.setMz}): offset and width of the nearest one are held.`
-      : null,
-    widthPointer: `${pointer}/peaks/${nearest.index}/width/value`,
-  };
-}
-
-function statedWindow(claim: Claim, setMz: number): Window {
-  const width = widthInMz(claim.width, setMz);
+function statedWindow({ width: claimed, pointer }: Claim, setMz: number): Window {
+  const width = widthInMz(claimed, setMz);
+  const input = `${pointer}/value`;
   return {
     kind: "window",
     mzLow: setMz - width / 2,
     mzHigh: setMz + width / 2,
-    height: claim.width.at,
+    height: claimed.at,
     evidence: "stated",
     drive: null,
     note: "The width is only claimed.",
-    widthPointer: `${claim.pointer}/value`,
+    widthPointer: input,
+    widthLever: claimedWidthLever(claimed, input, setMz),
   };
 }
 
-/** Volts of a stage at a set m/z, and what has to be said of them. */
-export interface VoltsSetting extends WindowDrive {
-  readonly note: string | null;
-}
-
-/** Volts at a set m/z on the lines between the points or on the stated law; null where one point does not reach. */
-export function voltsAt(operatingPoint: Of<"drives"> | Of<"drive-law">, setMz: number): VoltsSetting | null {
-  if (operatingPoint.by === "drive-law") {
-    const { rfPerMz, dcSlope, dcOffset_V } = operatingPoint;
-    const rfVolts = rfToCanonical(rfPerMz) * setMz;
-    const offset = rfPerMz.between === "pole-and-pole" ? dcOffset_V / 2 : dcOffset_V;
-    return {
-      volts: { rfVolts, dcVolts: dcSlope * rfVolts - offset },
-      convention: { rf: { as: rfPerMz.as, between: rfPerMz.between }, dc: { between: rfPerMz.between } },
-      note: null,
-    };
-  }
-  const sorted = operatingPoint.points
-    .map(({ mz, drive }) => ({ mz, volts: driveToCanonical(drive) }))
-    .sort((one, other) => one.mz - other.mz);
-  const convention = conventionOf(operatingPoint.points[0]!.drive);
-  if (sorted.length === 1 && Math.abs(sorted[0]!.mz - setMz) > 0.5) return null;
-  const rf = interpolate(
-    sorted.map(({ mz, volts }) => ({ x: mz, y: volts.rfVolts })),
-    setMz,
-    "extend",
-  );
-  const dc = interpolate(
-    sorted.map(({ mz, volts }) => ({ x: mz, y: volts.dcVolts })),
-    setMz,
-    "extend",
-  );
+/** A claimed width as the lever of the width in m/z. */
+export function claimedWidthLever({ as }: Width, input: string, setMz: number) {
   return {
-    volts: { rfVolts: rf.value, dcVolts: dc.value },
-    convention,
-    note: rf.outside
-      ? `m/z ${setMz} lies outside the drive points (${sorted[0]!.mz} to ${sorted[sorted.length - 1]!.mz}): their outermost line is extended.`
-      : null,
+    input,
+    unit: "1",
+    range: Width.shape.value,
+    falling: as === "resolution",
+    inputFor: (width: number) => (as === "mz" ? width : setMz / width),
   };
 }
 
-function computedWindow(filter: Placed<MassFilterStage>, setting: VoltsSetting, pointer: string): Window {
-  const { rodSet } = filter.stage;
-  if (rodSet === undefined) {
-    return {
-      kind: "unknown",
-      missing: [`${filter.pointer}/rodSet`],
-      reason: "The volts say nothing without the rods.",
-    };
-  }
-  const { rfVolts, dcVolts } = setting.volts;
-  const drive: WindowDrive = { volts: setting.volts, convention: setting.convention };
-  if (rfVolts <= 0 || dcVolts < 0) {
-    return {
-      kind: "empty",
-      reason: rfVolts <= 0 ? "There is no RF voltage." : "The DC voltage of the line is negative.",
-      evidence: "computed",
-      drive,
-    };
-  }
+function windowOnLine(line: SupplyLine, setMz: number, rodSet: RodSet, pointer: string): Window {
+  const drive = line(setMz);
+  return drive.kind === "unknown" ? drive : windowOfDrive(drive, drive.note, rodSet, pointer);
+}
+
+/** The passband of a drive as a window. */
+export function windowOfDrive(
+  drive: WindowDrive,
+  note: string | null,
+  rodSet: RodSet,
+  widthPointer: string,
+): Window {
+  const { rfVolts, dcVolts } = drive.volts;
+  const none = (reason: string): Window => ({ kind: "no-window", reason, evidence: "computed", drive });
+  if (rfVolts <= 0) return none("Without RF voltage nothing is selected.");
+  if (dcVolts <= 0)
+    return none("Without DC of the right sign every ion above the cutoff passes and none is selected.");
   const answer = passbandOf(dcVolts, rfVolts, fieldOf(rodSet));
-  if (answer.kind === "empty") {
+  if (answer.kind === "window") {
+    const { mzLow, mzHigh } = answer.passband;
     return {
-      kind: "empty",
-      reason: `U/V is ${(dcVolts / rfVolts).toPrecision(7)}, above the apex of the stability region: no m/z passes.`,
+      kind: "window",
+      mzLow,
+      mzHigh: mzHigh!,
+      height: "edges",
       evidence: "computed",
       drive,
+      note,
+      widthPointer,
+      widthLever: null,
     };
   }
   if (answer.kind === "not-converged") {
     return {
       kind: "unknown",
-      missing: [pointer],
+      missing: [widthPointer],
       reason: `The edges were not found within ${answer.steps} steps.`,
     };
   }
-  const { mzLow, mzHigh } = answer.passband;
-  if (mzHigh === null) {
-    return {
-      kind: "unknown",
-      missing: [pointer],
-      reason: "The stated drive has no DC: the rods pass every ion above the cutoff and select none.",
-    };
-  }
-  return {
-    kind: "window",
-    mzLow,
-    mzHigh,
-    height: "edges",
-    evidence: "computed",
-    drive,
-    note: setting.note,
-    widthPointer: pointer,
-  };
+  return none(
+    `U/V is ${(dcVolts / rfVolts).toPrecision(7)}, above the apex of the stability region: no m/z passes.`,
+  );
 }

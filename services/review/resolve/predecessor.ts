@@ -6,17 +6,14 @@ const HALF_UNIT_WINDOW = 0.5;
 
 /**
  * The acquisition that comes before this one at some moment of the schedule and puts another precursor's ions of the
- * same product into the cell, or null. The last acquisition of a round comes before the first of the next.
+ * same product into the cell, or null.
  */
 export function previousWithSameProduct(
-  method: ResolvedMethod,
+  { acquisitions, schedule }: ResolvedMethod,
   each: ResolvedAcquisition,
 ): ResolvedAcquisition | null {
-  const own = method.acquisitions.indexOf(each);
-  for (const { active } of method.schedule.moments) {
-    const place = active.indexOf(own);
-    if (place < 0 || active.length < 2) continue;
-    const previous = method.acquisitions[active[(place + active.length - 1) % active.length]!]!;
+  for (const index of schedule.turns[each.index]!.predecessors) {
+    const previous = acquisitions[index]!;
     if (sharesProduct(previous, each)) return previous;
   }
   return null;

@@ -1,12 +1,14 @@
 import type { Ion } from "../../contract/ion.ts";
 import { mzOfIon } from "../../contract/ion.ts";
+import { Mz } from "../../contract/quantity.ts";
 import type { Width } from "../../contract/width.ts";
 import type { Acquisition } from "../acquisition.ts";
 import type { Instrument, MassFilterStage, Stage } from "../instrument.ts";
+import { leverOn, leverThrough } from "../lever.ts";
 import type { Method } from "../method.ts";
 import { guidesOf } from "./guides.ts";
 import { guidingOf } from "./guiding.ts";
-import { windowAt } from "./operating-point.ts";
+import { type WindowSource, windowsOf } from "./operating-point.ts";
 import { cellOf, filterAfterCell, filterBeforeCell, filterNamed, filtersOf, placedStages } from "./path.ts";
 import type {
   Filtering,
@@ -24,20 +26,22 @@ import { scheduleOf } from "./schedule.ts";
  */
 export function resolveMethod(instrument: Instrument, method: Method): ResolvedMethod {
   const stages = placedStages(instrument);
+  const filters = filtersOf(stages);
   const path: Path = {
     stages,
+    windows: new Map(filters.map((filter) => [filter.pointer, windowsOf(filter)])),
     before: filterBeforeCell(stages),
     after: filterAfterCell(stages),
     cell: cellOf(stages),
   };
   const acquisitions = method.acquisition.map((acquisition, index) =>
-    resolveAcquisition(acquisition, `/method/acquisition/${index}`, path, method),
+    resolveAcquisition(acquisition, index, path, method),
   );
   return {
     instrument,
     method,
     stages,
-    filters: filtersOf(stages),
+    filters,
     acquisitions,
     guides: guidesOf(stages, acquisitions),
     schedule: scheduleOf(method),
@@ -46,6 +50,8 @@ export function resolveMethod(instrument: Instrument, method: Method): ResolvedM
 
 interface Path {
   readonly stages: readonly Placed<Stage>[];
+  /** By the pointer of the filter. */
+  readonly windows: ReadonlyMap<string, WindowSource>;
   readonly before: Placed<MassFilterStage> | null;
   readonly after: Placed<MassFilterStage> | null;
   readonly cell: Placed<Extract<Stage, { role: "collision-cell" }>> | null;
@@ -61,48 +67,46 @@ interface Setting {
   readonly setMzPointer: string;
   readonly width: Width | undefined;
   readonly widthPointer: string;
+  /** What is added to the member at `setMzPointer`. */
+  readonly shift: number;
 }
 
 function resolveAcquisition(
   acquisition: Acquisition,
-  pointer: string,
+  index: number,
   path: Path,
   method: Method,
 ): ResolvedAcquisition {
-  const resolved: ResolvedAcquisition = {
-    acquisition,
-    pointer,
-    polarity: acquisition.polarity ?? method.polarity,
-    filterings: [],
-    cells: [],
-  };
-  switch (acquisition.kind) {
-    case "selected-ion":
-      return {
-        ...resolved,
-        filterings: at(acquisition, filterNamed(path.stages, acquisition.stage), [
-          ionSetting(pointer, "ion", acquisition.ion, "setMz", acquisition.setMz, "width", acquisition.width),
-        ]),
-      };
-    case "scan":
-      return {
-        ...resolved,
-        filterings: at(
-          acquisition,
-          filterNamed(path.stages, acquisition.stage),
-          scanEnds(pointer, acquisition, 0, "width", acquisition.width),
-        ),
-      };
-    default: {
-      const precursors = precursorSettings(acquisition, pointer);
-      const products = productSettings(acquisition, pointer);
-      return {
-        ...resolved,
-        filterings: [...at(acquisition, path.before, precursors), ...at(acquisition, path.after, products)],
-        cells: cellGuidings(acquisition, pointer, path.cell, precursors, products),
-      };
-    }
+  const pointer = `/method/acquisition/${index}`;
+  const polarity = acquisition.polarity ?? method.polarity;
+  const common = { acquisition, index, pointer, polarity };
+  if (acquisition.kind === "scan" || acquisition.kind === "selected-ion") {
+    const settings = singleSettings(acquisition, pointer);
+    return {
+      ...common,
+      filterings: at(acquisition, filterNamed(path.stages, acquisition.stage), path, settings),
+      cells: cellGuidings(acquisition, pointer, path.cell, settings, settings),
+    };
   }
+  const precursors = precursorSettings(acquisition, pointer);
+  const products = productSettings(acquisition, pointer);
+  return {
+    ...common,
+    filterings: [
+      ...at(acquisition, path.before, path, precursors),
+      ...at(acquisition, path.after, path, products),
+    ],
+    cells: cellGuidings(acquisition, pointer, path.cell, precursors, products),
+  };
+}
+
+type SingleAcquisition = Extract<Acquisition, { kind: "scan" | "selected-ion" }>;
+
+function singleSettings(acquisition: SingleAcquisition, pointer: string): Setting[] {
+  const { width } = acquisition;
+  return acquisition.kind === "scan"
+    ? scanEnds(pointer, acquisition, 0, "width", width)
+    : [ionSetting(pointer, "ion", acquisition.ion, "setMz", acquisition.setMz, "width", width)];
 }
 
 type CellAcquisition = Exclude<Acquisition, { kind: "scan" | "selected-ion" }>;
@@ -163,6 +167,7 @@ function ionSetting(
     setMzPointer: `${pointer}/${setMember}`,
     width,
     widthPointer: `${pointer}/${widthMember}`,
+    shift: 0,
   };
 }
 
@@ -182,31 +187,31 @@ function scanEnds(
     setMzPointer: `${pointer}/${end}`,
     width,
     widthPointer: `${pointer}/${widthMember}`,
+    shift,
   }));
 }
 
 function at(
   acquisition: Acquisition,
   filter: Placed<MassFilterStage> | null,
-  settings: Setting[],
+  { windows }: Path,
+  settings: readonly Setting[],
 ): Filtering[] {
   if (filter === null) return [];
-  return settings.map((setting) => {
+  const windowAt = windows.get(filter.pointer)!;
+  return settings.map(({ width, widthPointer, shift, ...setting }) => {
     const setMz = setting.setMz ?? setting.mz;
-    const claim =
-      setting.width === undefined ? null : { width: setting.width, pointer: setting.widthPointer };
+    const claim = width === undefined ? null : { width, pointer: widthPointer };
     return {
+      ...setting,
       acquisition,
       filter,
-      target: setting.target,
-      pointer: setting.pointer,
-      ion: setting.ion,
-      mz: setting.mz,
       setMz,
       setMzStated: setting.setMz !== undefined,
-      setMzPointer: setting.setMzPointer,
       claim,
-      window: windowAt(filter, setMz, claim),
+      window: windowAt(setMz, claim),
+      setMzLever: leverThrough(leverOn(setting.setMzPointer, "1", Mz), (mz) => mz - shift)!,
+      windowIfSetTo: (mz) => windowAt(mz, claim),
     };
   });
 }
@@ -216,14 +221,14 @@ function at(
  * both ends of a scan, because the end at which the cell is worst depends on what its RF follows.
  */
 function cellGuidings(
-  acquisition: CellAcquisition,
+  acquisition: Acquisition,
   pointer: string,
   cell: Path["cell"],
   precursors: readonly Setting[],
   products: readonly Setting[],
 ): Guiding[] {
   if (cell === null) return [];
-  const own = acquisition.cell?.rf;
+  const own = "cell" in acquisition ? acquisition.cell?.rf : undefined;
   const setting =
     own === undefined
       ? { rf: cell.stage.rf, pointer: `${cell.pointer}/rf` }

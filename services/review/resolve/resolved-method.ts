@@ -1,9 +1,10 @@
 import type { RodSet } from "../../contract/rod-set.ts";
-import type { Width } from "../../contract/width.ts";
 import type { Acquisition, Polarity } from "../acquisition.ts";
 import type { Evidence } from "../finding.ts";
 import type { CellRf, Instrument, MassFilterStage, Stage } from "../instrument.ts";
+import type { Lever } from "../lever.ts";
 import type { Method } from "../method.ts";
+import type { Claim } from "./operating-point.ts";
 import type { Schedule } from "./schedule.ts";
 import type { Window } from "./window.ts";
 
@@ -26,8 +27,12 @@ export interface Filtering {
   readonly setMzStated: boolean;
   readonly setMzPointer: string;
   /** Window that the method claims. */
-  readonly claim: { readonly width: Width; readonly pointer: string } | null;
+  readonly claim: Claim | null;
   readonly window: Window;
+  /** The set m/z as a lever: its own member, or the end of a scan that it follows. */
+  readonly setMzLever: Lever;
+  /** The window at another set m/z, all else unchanged. */
+  readonly windowIfSetTo: (setMz: number) => Window;
 }
 
 /** An RF-only stage as one acquisition sets it. */
@@ -41,13 +46,15 @@ export interface Guiding {
   /** Zero-to-peak, pole-to-ground; null where it does not follow from what is stated. */
   readonly rfVolts: number | null;
   readonly rfMissing: readonly string[];
+  readonly voltsLever: Lever | null;
   /** Low-mass cutoff in m/z; null where it does not follow, or is not defined (more than two pole pairs). */
   readonly cutoffMz: number | null;
   readonly cutoffMissing: readonly string[];
+  readonly cutoffLever: Lever | null;
   readonly evidence: Evidence;
-  /** The ion that enters the cell and the one that must leave it; a guide has only the one that must get through. */
+  /** The ion that enters a cell; a guide has only the one that must get through. */
   readonly precursor: GuidedIon | null;
-  readonly product: GuidedIon | null;
+  readonly product: GuidedIon;
 }
 
 export interface GuidedIon {
@@ -59,10 +66,14 @@ export interface GuidedIon {
 
 export interface ResolvedAcquisition {
   readonly acquisition: Acquisition;
+  readonly index: number;
   readonly pointer: string;
   readonly polarity: Polarity;
   readonly filterings: readonly Filtering[];
-  /** The collision cell for each pair of a precursor and a product: one in a transition, two in a scan. */
+  /**
+   * The collision cell for each pair of a precursor and a product: one in a transition, two in a scan. What a single
+   * filter selects passes the cell whole: the same ion is both.
+   */
   readonly cells: readonly Guiding[];
 }
 

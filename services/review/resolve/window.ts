@@ -1,11 +1,16 @@
 import type { CanonicalVolts, VoltageConvention } from "../../contract/drive.ts";
 import type { WidthHeight } from "../../contract/width.ts";
 import type { Evidence } from "../finding.ts";
+import type { Lever } from "../lever.ts";
 
 /** Volts with the convention in which the laboratory states them. */
 export interface WindowDrive {
   readonly volts: CanonicalVolts;
   readonly convention: VoltageConvention;
+  /** The row of the operating point that sets the DC here more than the others do. */
+  readonly row: number;
+  /** The DC of a row, or the slope of the line, as the lever of U here; null where it does not act on it. */
+  readonly dcLever: (row: number) => Lever | null;
 }
 
 /** What a mass filter lets through at one set m/z, as far as it is known. */
@@ -23,9 +28,12 @@ export type Window =
       readonly note: string | null;
       /** Pointer of the input that sets the width. */
       readonly widthPointer: string;
+      /** That input as the lever of the width in m/z; null where volts set it. */
+      readonly widthLever: Lever | null;
     }
   | {
-      readonly kind: "empty";
+      /** Volts that pass nothing, or select nothing. */
+      readonly kind: "no-window";
       readonly reason: string;
       readonly evidence: Evidence;
       readonly drive: WindowDrive;
@@ -34,11 +42,11 @@ export type Window =
 
 export type KnownWindow = Extract<Window, { kind: "window" }>;
 
-export function widthOf(window: KnownWindow): number {
+export function widthOf(window: Pick<KnownWindow, "mzLow" | "mzHigh">): number {
   return window.mzHigh - window.mzLow;
 }
 
-export function centreOf(window: KnownWindow): number {
+export function centreOf(window: Pick<KnownWindow, "mzLow" | "mzHigh">): number {
   return (window.mzLow + window.mzHigh) / 2;
 }
 

@@ -1,0 +1,83 @@
+import type { PassesIf } from "../finding.ts";
+import { bothPassIf } from "../lever.ts";
+import {
+  type About,
+  marginOf,
+  notApplicable,
+  type Observation,
+  outcomeOf,
+  type Reading,
+} from "../observation.ts";
+import type { Filtering, Placed, ResolvedMethod } from "../resolve/resolved-method.ts";
+
+/** One set point in a stage, for whose ion the stage is judged. */
+export interface InStage {
+  readonly acquisition: { readonly id: string };
+  readonly ion: string;
+}
+
+/** All that the method sets at one filter. */
+export function settingsAt(
+  { acquisitions }: ResolvedMethod,
+  filter: Placed<Filtering["filter"]["stage"]>,
+): Filtering[] {
+  return acquisitions.flatMap(({ filterings }) =>
+    filterings.filter((filtering) => filtering.filter.pointer === filter.pointer),
+  );
+}
+
+/**
+ * One observation of a stage, the worst of its settings: one that fails, whatever the others lack; else all that is
+ * missing; else the one nearest to its bound. It names the acquisition and the ion that decide.
+ */
+export function worstOfStage<Setting extends InStage>(
+  about: About,
+  settings: readonly Setting[],
+  whyNone: string,
+  read: (setting: Setting) => Reading,
+): Observation {
+  const readings = settings.map((setting) => ({ setting, reading: read(setting) }));
+  let worst: (typeof readings)[number] | null = null;
+  for (const each of readings) {
+    if (worst === null || closeness(each.reading) < closeness(worst.reading)) worst = each;
+  }
+  const missing = [
+    ...new Set(readings.flatMap(({ reading }) => (reading.kind === "indeterminate" ? reading.missing : []))),
+  ];
+  const fails = worst !== null && outcomeOf(worst.reading) === "fail";
+  if (!fails && missing.length > 0) {
+    const first = readings.find(({ reading }) => reading.kind === "indeterminate")!;
+    return { ...about, kind: "indeterminate", missing, statement: first.reading.statement };
+  }
+  if (worst === null || worst.reading.kind === "not-applicable")
+    return { ...about, ...notApplicable(whyNone) };
+  const { setting, reading } = worst;
+  const subject = { ...about.subject, acquisition: setting.acquisition.id, ion: setting.ion };
+  if (reading.kind !== "value" && reading.kind !== "impossible") return { ...about, ...reading };
+  return {
+    ...about,
+    ...reading,
+    subject,
+    passesIf: () => passesForAll(readings.map((each) => each.reading)),
+  };
+}
+
+/** Smaller is worse; what was not judged comes last. */
+function closeness(reading: Reading): number {
+  if (reading.kind === "impossible") return Number.NEGATIVE_INFINITY;
+  if (reading.kind !== "value") return Number.POSITIVE_INFINITY;
+  return marginOf(reading.value, reading.pass) ?? Number.MAX_VALUE;
+}
+
+/** What brings every setting of the stage that misses its limit within it. */
+function passesForAll(readings: readonly Reading[]): PassesIf | null {
+  let all: PassesIf | null = null;
+  for (const reading of readings) {
+    if (reading.kind !== "value" && reading.kind !== "impossible") continue;
+    if (outcomeOf(reading) === "pass") continue;
+    const one = reading.passesIf();
+    all = all === null ? one : bothPassIf(all, one);
+    if (all === null) return null;
+  }
+  return all;
+}
