@@ -70,7 +70,10 @@ function judge(benchCase: BenchCase, time: number, speed: number): { target: str
   const { target, unit } = benchCase;
   if (target === null) return { target: "none", met: null };
   if (target.of === "speed") return { target: `speed >= ${target.least}`, met: speed >= target.least };
-  const stretch = target.stretch === undefined ? "" : `, stretch ${target.stretch}`;
+  const stretch =
+    target.stretch === undefined
+      ? ""
+      : ` (stretch ${target.stretch}: ${time <= target.stretch ? "met" : "not met"})`;
   return { target: `<= ${target.most} ${unit}${stretch}`, met: time <= target.most };
 }
 

@@ -9,7 +9,7 @@ function side({ label, median, quartileLow, quartileHigh, checksum }: SideResult
 
 /** One case as text: both sides with median, quartiles and checksum, the speed of a over b, and the verdict. */
 export function caseAsText(result: CaseResult): string {
-  const met = result.met === null ? "" : result.met ? " met" : " MISSED";
+  const met = result.met === null ? "" : result.met ? ": MET" : ": MISSED";
   const work = result.sameWork === false ? "  THE CHECKSUMS DISAGREE" : "";
   const lines = [
     result.name,
