@@ -6,12 +6,10 @@ import { SealState } from "./seal.ts";
 
 export const VerificationRequest = z
   .strictObject({
-    record: z
-      .record(z.string(), z.unknown())
-      .meta({
-        id: "KeptRecord",
-        description: "The record as it was kept: a SealedRecord, or what has become of one.",
-      }),
+    record: z.record(z.string(), z.unknown()).meta({
+      id: "KeptRecord",
+      description: "The record as it was kept: a SealedRecord, or what has become of one.",
+    }),
     criteria: Criteria.optional().meta({
       description: "Criteria to hold the method to today, in place of those on record.",
     }),
@@ -19,12 +17,10 @@ export const VerificationRequest = z
   .meta({ id: "VerificationRequest" });
 export type VerificationRequest = z.output<typeof VerificationRequest>;
 
-const Shown = z
-  .union([z.string(), z.number(), z.boolean(), z.null()])
-  .meta({
-    id: "ShownValue",
-    description: "A value; objects, arrays and long texts as the start of their JSON.",
-  });
+const Shown = z.union([z.string(), z.number(), z.boolean(), z.null()]).meta({
+  id: "ShownValue",
+  description: "A value; objects, arrays and long texts as the start of their JSON.",
+});
 
 export const RecordDifference = z
   .strictObject({
