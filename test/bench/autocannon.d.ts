@@ -1,7 +1,7 @@
 declare module "autocannon" {
   /** The part of its result that the benchmark reads. */
   interface Result {
-    readonly requests: { readonly average: number };
+    readonly "2xx": number;
     readonly non2xx: number;
     readonly errors: number;
   }
@@ -11,6 +11,8 @@ declare module "autocannon" {
     readonly headers: Readonly<Record<string, string>>;
     readonly body: string;
     readonly connections: number;
-    readonly duration: number;
+    /** Requests in one run. */
+    readonly amount: number;
+    readonly sampleInt: number;
   }): Promise<Result>;
 }

@@ -2,10 +2,10 @@ import { type ChildProcess, spawn } from "node:child_process";
 import { createInterface } from "node:readline";
 import { fileURLToPath } from "node:url";
 import autocannon from "autocannon";
+import type { BenchCase, Side } from "./bench-case.ts";
 
 const SERVER = fileURLToPath(new URL("./http-server.ts", import.meta.url));
-const ROUNDS = 5;
-const ROUND_S = 1;
+const REQUESTS = 600;
 const CONNECTIONS = 10;
 
 /** One ion's stability, posted to both sides. */
@@ -19,68 +19,65 @@ const BODY = JSON.stringify({
   ions: [{ mz: 500 }],
 });
 
-export interface ThroughputRatio {
-  readonly name: string;
-  /** Least ratio of service to echo. */
-  readonly target: number;
-  readonly service_perS: readonly number[];
-  readonly echo_perS: readonly number[];
-  readonly ratio: number;
-}
+/** A server in a process of its own, so that the client does not compete with it for one event loop. */
+class Server {
+  readonly kind: "service" | "echo";
+  process: ChildProcess | null = null;
+  url = "";
 
-/**
- * Requests per second of a one-ion answer against a bare Express that echoes the same body. Each side is a process of
- * its own; rounds alternate, so that a slow moment of the machine meets both.
- */
-export async function oneIonAgainstEcho(): Promise<ThroughputRatio> {
-  const [service, echo] = await Promise.all([start("service"), start("echo")]);
-  try {
-    await round(service.url);
-    await round(echo.url);
-    const service_perS: number[] = [];
-    const echo_perS: number[] = [];
-    for (let i = 0; i < ROUNDS; i++) {
-      service_perS.push(await round(service.url));
-      echo_perS.push(await round(echo.url));
+  constructor(kind: "service" | "echo") {
+    this.kind = kind;
+  }
+
+  async open(): Promise<void> {
+    this.process = spawn(process.execPath, ["--import", "tsx", SERVER, this.kind], {
+      stdio: ["ignore", "ignore", "pipe"],
+    });
+    for await (const line of createInterface({ input: this.process.stderr! })) {
+      if (!line.startsWith("http://")) continue;
+      this.url = `${line}/v1/stability`;
+      return;
     }
-    const ratio = median(service_perS) / median(echo_perS);
-    return {
-      name: "HTTP: one ion's stability against a bare echo",
-      target: 0.7,
-      service_perS,
-      echo_perS,
-      ratio,
-    };
-  } finally {
-    service.process.kill();
-    echo.process.kill();
+    throw new Error(`The side ${this.kind} did not start.`);
+  }
+
+  /** How many requests were answered. */
+  async ask(): Promise<number> {
+    const answered = await autocannon({
+      url: this.url,
+      method: "POST",
+      headers: { "content-type": "application/json" },
+      body: BODY,
+      connections: CONNECTIONS,
+      amount: REQUESTS,
+      // A run ends at a sample: at the usual one a second, every run would take a whole second.
+      sampleInt: 5,
+    });
+    if (answered.non2xx + answered.errors > 0) throw new Error(`Requests failed at ${this.url}.`);
+    return answered["2xx"];
   }
 }
 
-async function start(side: "service" | "echo"): Promise<{ process: ChildProcess; url: string }> {
-  const child = spawn(process.execPath, ["--import", "tsx", SERVER, side], {
-    stdio: ["ignore", "ignore", "pipe"],
-  });
-  for await (const line of createInterface({ input: child.stderr })) {
-    if (line.startsWith("http://")) return { process: child, url: `${line}/v1/stability` };
-  }
-  throw new Error(`The side ${side} did not start.`);
+function sideOf(server: Server, label: string): Side {
+  return { label, operations: REQUESTS, run: () => server.ask() };
 }
 
-async function round(url: string): Promise<number> {
-  const { requests, non2xx, errors } = await autocannon({
-    url,
-    method: "POST",
-    headers: { "content-type": "application/json" },
-    body: BODY,
-    connections: CONNECTIONS,
-    duration: ROUND_S,
-  });
-  if (non2xx + errors > 0) throw new Error(`${non2xx + errors} requests failed at ${url}.`);
-  return requests.average;
-}
+const service = new Server("service");
+const echo = new Server("echo");
 
-function median(values: readonly number[]): number {
-  const sorted = [...values].sort((one, other) => one - other);
-  return sorted[Math.floor(sorted.length / 2)]!;
-}
+export const HTTP_CASES: readonly BenchCase[] = [
+  {
+    name: "HTTP, stability of one ion",
+    target: { of: "speed", least: 0.7 },
+    unit: "us",
+    a: sideOf(service, "service, a line of log a request"),
+    b: sideOf(echo, "express(), express.json(), res.json(req.body)"),
+    checksumTolerance: 0,
+    note: `Both get the same ${Buffer.byteLength(BODY)} bytes over ${CONNECTIONS} connections.`,
+    open: async () => void (await Promise.all([service.open(), echo.open()])),
+    close: async () => {
+      service.process?.kill();
+      echo.process?.kill();
+    },
+  },
+];
