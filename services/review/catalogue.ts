@@ -2,9 +2,10 @@ import { z } from "zod";
 import { CHECKS } from "./checks.ts";
 import type { Limit } from "./limit.ts";
 
-const LimitShown = z
-  .record(z.string(), z.number())
-  .meta({ id: "LimitShown", description: "Parts of a limit, as criteria state them: min, max, minOfWidth and the like." });
+const LimitShown = z.record(z.string(), z.number()).meta({
+  id: "LimitShown",
+  description: "Parts of a limit, as criteria state them: min, max, minOfWidth and the like.",
+});
 
 const CatalogueEntry = z
   .strictObject({
@@ -37,7 +38,10 @@ export function catalogue(): Catalogue {
 }
 
 function shown(limit: Limit): Record<string, number> {
-  return Object.fromEntries(Object.entries(limit).filter(([, bound]) => bound !== undefined)) as Record<string, number>;
+  return Object.fromEntries(Object.entries(limit).filter(([, bound]) => bound !== undefined)) as Record<
+    string,
+    number
+  >;
 }
 
 /** The catalogue as a page. */
@@ -54,7 +58,12 @@ export function catalogueMarkdown({ checks }: Catalogue): string {
 }
 
 function table(rows: readonly (readonly string[])[]): string {
-  return ["| quantity | unit | meaning |", "|---|---|---|", ...rows.map((row) => `| ${row.join(" | ")} |`), ""].join("\n");
+  return [
+    "| quantity | unit | meaning |",
+    "|---|---|---|",
+    ...rows.map((row) => `| ${row.join(" | ")} |`),
+    "",
+  ].join("\n");
 }
 
 const PARTS: Readonly<Record<string, (bound: number) => string>> = {
