@@ -1,5 +1,5 @@
 /** The variables that the service reads, all of them: any other RODSET_ variable is taken for a slip of the pen. */
-const VARIABLES = {
+export const VARIABLES = {
   RODSET_HOST: {
     means: "Address that both listeners bind to; 0.0.0.0 inside a container.",
     fallback: "127.0.0.1",
