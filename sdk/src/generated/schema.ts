@@ -454,6 +454,13 @@ export interface components {
             pass?: components["schemas"]["LowerLimitByWidth"];
             caution?: components["schemas"]["LowerLimitByWidth"];
         };
+        /** @description What computed a result: the same engine gives the same numbers. */
+        Engine: {
+            /** @description Version of the service that computed. */
+            version: string;
+            /** @description Edition of the physical constants. */
+            constants: string;
+        };
         /** @description One thing that is wrong with a request, and where. */
         ErrorOfMember: {
             /** @description JSON Pointer (RFC 6901) to the member; empty for the body. */
@@ -1104,6 +1111,14 @@ export interface components {
             /** @description Smallest value, in the unit of the finding. */
             min?: number;
         };
+        RecordDigests: {
+            /** @description SHA-256 of the canonical JSON (RFC 8785) of input, in hexadecimal digits. */
+            input: string;
+            /** @description SHA-256 of the canonical JSON of result, in hexadecimal digits. */
+            result: string;
+            /** @description SHA-256 of the canonical JSON of format, engine and digests with only the two above in it, in hexadecimal digits. */
+            record: string;
+        };
         RectangularWaveform: {
             /**
              * @description discriminator enum property added by openapi-typescript
@@ -1250,6 +1265,25 @@ export interface components {
             pass?: components["schemas"]["UpperLimit"];
             caution?: components["schemas"]["UpperLimit"];
         };
+        /** @description Shows that nothing was altered since; no person's electronic signature. */
+        Seal: {
+            /** @description JWS in compact form (RFC 7515), alg Ed25519 (RFC 9864), kid the RFC 7638 thumbprint of the key. Its payload is the canonical JSON of the digest that is sealed, in recordDigest, and of the time of sealing, in sealedAt (ISO 8601, UTC). */
+            jws: string;
+        };
+        /** @description A sign-off that can be verified years later. It holds no clock but the one in the seal: the same request and version give the same record. */
+        SealedRecord: {
+            /**
+             * @description Layout of the record.
+             * @constant
+             */
+            format: 1;
+            engine: components["schemas"]["Engine"];
+            input: components["schemas"]["SignOffRequest"];
+            result: components["schemas"]["SignOffResult"];
+            digests: components["schemas"]["RecordDigests"];
+            /** @description null where the service holds no key. */
+            seal: components["schemas"]["Seal"] | null;
+        };
         SelectedIon: {
             /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
             id: string;
@@ -1360,12 +1394,23 @@ export interface components {
                 id: string;
                 revision: string;
             } | null;
+            record: components["schemas"]["SealedRecord"];
             cautions: string[];
         };
         SignOffRequest: {
             instrument: components["schemas"]["Instrument"];
             method: components["schemas"]["Method"];
             criteria?: components["schemas"]["Criteria"];
+        };
+        /** @description What a sign-off found: the part that goes on record. */
+        SignOffResult: {
+            verdict: components["schemas"]["Verdict"];
+            verdictStatement: string;
+            outcomeCounts: components["schemas"]["OutcomeCounts"];
+            findings: components["schemas"]["Finding"][];
+            settings: components["schemas"]["Setting"][];
+            notShown: components["schemas"]["NotShown"][];
+            waivers: components["schemas"]["WaivedCheck"][];
         };
         SinusoidWaveform: {
             /**
