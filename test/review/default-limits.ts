@@ -3,7 +3,7 @@ import { mzTimesQPerVolt } from "../../services/physics/mathieu-parameters.ts";
 import type { Outcome } from "../../services/review/finding.ts";
 import type { SignOffRequest } from "../../services/review/sign-off-schema.ts";
 import {
-  type collisionCell,
+  type CollisionCell,
   dc,
   edges,
   instrument,
@@ -75,7 +75,7 @@ const slope = (margin_ppm: number, ratio_ppm?: number) =>
     ...(ratio_ppm === undefined ? {} : { tolerances: { ratio_ppm } }),
   });
 
-const cell = (over: Parameters<typeof collisionCell>[0], precursor = 500, product = 120) =>
+const cell = (over: Partial<CollisionCell>, precursor = 500, product = 120) =>
   request({
     instrument: tripleQuadrupole({ q2: over }),
     method: method([transition("A", precursor, product)]),

@@ -4,7 +4,7 @@ import { defineCheck } from "../check.ts";
 import type { Bounds } from "../finding.ts";
 import { leverOn, passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
-import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
+import { lacking, type Observation, type Reading } from "../observation.ts";
 import { previousWithSameProduct } from "../resolve/predecessor.ts";
 import type { ResolvedAcquisition, ResolvedMethod } from "../resolve/resolved-method.ts";
 import { digits } from "../statement.ts";
@@ -55,8 +55,8 @@ function pauseOverNeeded(
   if (pause_ms === undefined || missing.length > 0) {
     return lacking(`Whether the pause before ${acquisition.id} is long enough`, missing);
   }
+  // Above zero: no residence in a stage is.
   const needed_ms = settle_ms + flight_ms + clearing_ms;
-  if (needed_ms === 0) return notApplicable("Settling, flight and clearing are stated to take no time.");
   return {
     kind: "value",
     value: pause_ms / needed_ms,
