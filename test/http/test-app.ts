@@ -1,7 +1,6 @@
 import request, { type Response } from "supertest";
 import { expect } from "vitest";
 import { createApp } from "../../services/http/app.ts";
-import type { AnyEndpoint } from "../../services/http/endpoint.ts";
 import { ENDPOINTS } from "../../services/http/endpoints.ts";
 import type { ErrorCode } from "../../services/http/error-codes.ts";
 import { limitsOf } from "../../services/http/limits.ts";
@@ -23,7 +22,7 @@ export function testApp({ endpoints = ENDPOINTS, bodyLimit_kB = 512, level = "in
 
 const { app } = testApp({ level: "silent" });
 
-export async function ask(path: string, body: unknown): Promise<Response> {
+async function ask(path: string, body: unknown): Promise<Response> {
   return request(app)
     .post(path)
     .set("Content-Type", "application/json")
@@ -52,10 +51,4 @@ export function problemIn(response: Response): Problem {
   expect(problem.status).toBe(response.status);
   expect(problem.requestId).toBe(response.headers["x-request-id"]);
   return problem;
-}
-
-export function endpointNamed(operationId: string): AnyEndpoint {
-  const found = ENDPOINTS.find((endpoint) => endpoint.operationId === operationId);
-  if (found === undefined) throw new Error(`There is no operation ${operationId}.`);
-  return found;
 }

@@ -1,5 +1,5 @@
 /** Parts of requests that the tests of several endpoints share. */
-export const zeroToPeakToGround = { as: "zero-to-peak", between: "pole-and-ground" } as const;
+const zeroToPeakToGround = { as: "zero-to-peak", between: "pole-and-ground" } as const;
 export const toGround = { rf: zeroToPeakToGround, dc: { between: "pole-and-ground" } } as const;
 
 export function rodSet(fieldRadius_mm: number, frequency_MHz: number, more: object = {}) {
