@@ -7,7 +7,8 @@ export function expectationOf(schema: unknown): string {
     return `${kind}${range(schema.minValue, schema.maxValue)}`;
   }
   if (schema instanceof z.ZodString) {
-    return `a text${range(schema.minLength, schema.maxLength, " characters")}`;
+    const { minLength, maxLength } = z.toJSONSchema(schema);
+    return `a text${range(minLength, maxLength, " characters")}`;
   }
   if (schema instanceof z.ZodArray) {
     const { minItems, maxItems } = z.toJSONSchema(schema);
