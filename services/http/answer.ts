@@ -1,8 +1,8 @@
 import type { Request } from "express";
 import type { z } from "zod";
-import type { AnyEndpoint, Limits } from "./endpoint.ts";
-import { type ErrorList, errorList } from "./error-list.ts";
-import { ProblemError } from "./problem-document.ts";
+import type { AnyEndpoint, Limits, Sealing } from "./endpoint.ts";
+import { errorList } from "./error-list.ts";
+import { invalidRequest, ProblemError } from "./problem-document.ts";
 import { checkAgainst } from "./schema-errors.ts";
 
 /** An answer in the form the caller accepts. */
@@ -11,11 +11,19 @@ export interface WrittenAnswer {
   readonly body: string;
 }
 
-/** Request schema -> rules -> work limit -> handler -> answer schema. */
-export function answerOf(endpoint: AnyEndpoint, document: unknown, limits: Limits): unknown {
+/** Request schema -> rules -> work limit -> handler -> seal -> answer schema. */
+export async function answerOf(
+  endpoint: AnyEndpoint,
+  document: unknown,
+  limits: Limits,
+  sealing: Sealing,
+): Promise<unknown> {
   const request = endpoint.request === null ? null : accept(endpoint, document);
   refuseTooMuchWork(endpoint, request);
-  const answer = endpoint.answer.safeParse(endpoint.handler(request, limits));
+  const handled = endpoint.handler(request, limits);
+  const sealed =
+    endpoint.withSeal === undefined ? handled : await endpoint.withSeal(handled, request, sealing);
+  const answer = endpoint.answer.safeParse(sealed);
   // zod's numbers are finite: NaN and Infinity, which JSON would turn into null in silence, end here too.
   if (!answer.success) throw new WrongAnswerError(answer.error.issues[0]);
   return answer.data;
@@ -23,14 +31,10 @@ export function answerOf(endpoint: AnyEndpoint, document: unknown, limits: Limit
 
 function accept(endpoint: AnyEndpoint, document: unknown): unknown {
   const { accepted, errors } = checkAgainst(endpoint.request as z.ZodType, document);
-  if (errors !== null) throw invalid(errors);
+  if (errors !== null) throw invalidRequest(errors);
   const broken = (endpoint.rules ?? []).flatMap((rule) => rule(accepted));
-  if (broken.length > 0) throw invalid(errorList(broken, (item) => item));
+  if (broken.length > 0) throw invalidRequest(errorList(broken, (item) => item));
   return accepted;
-}
-
-function invalid(errors: ErrorList): ProblemError {
-  return new ProblemError("invalid-request", "`errors` says which members are wrong, and how.", { errors });
 }
 
 /**

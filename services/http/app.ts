@@ -3,7 +3,7 @@ import type { Logger } from "pino";
 import { answerOf, formFor, type WrittenAnswer, write } from "./answer.ts";
 import { arrival } from "./arrival.ts";
 import { logDefect } from "./defect.ts";
-import type { AnyEndpoint, Limits } from "./endpoint.ts";
+import type { AnyEndpoint, Limits, Sealing } from "./endpoint.ts";
 import { ProblemError, problemDocument } from "./problem-document.ts";
 import { PROBLEMS } from "./problems.ts";
 import { reply, replyEmpty, travelOf } from "./reply.ts";
@@ -14,11 +14,21 @@ export interface AppParts {
   /** The bytes that GET /openapi.json answers. */
   readonly openApiDocument: Buffer;
   readonly limits: Limits;
+  readonly sealing?: Sealing;
   readonly logger: Logger;
 }
 
+/** A service that was given no key seals nothing and knows no seal. */
+const NO_KEY: Sealing = { key: null, known: [], now: () => new Date() };
+
 /** The service as an Express application. It holds no state between two requests. */
-export function createApp({ endpoints, openApiDocument, limits, logger }: AppParts): Express {
+export function createApp({
+  endpoints,
+  openApiDocument,
+  limits,
+  sealing = NO_KEY,
+  logger,
+}: AppParts): Express {
   const app = express();
   app.disable("x-powered-by");
   app.disable("etag");
@@ -26,7 +36,7 @@ export function createApp({ endpoints, openApiDocument, limits, logger }: AppPar
   app.enable("strict routing");
 
   app.use(arrival(logger));
-  for (const [path, methods] of byPath(endpoints)) mount(app, path, methods, limits);
+  for (const [path, methods] of byPath(endpoints)) mount(app, path, methods, limits, sealing);
   app.get("/openapi.json", fixed("openApiDocument", openApiDocument));
   app.all("/openapi.json", otherMethods(["get"]));
   app.use(() => {
@@ -44,10 +54,18 @@ function byPath(endpoints: readonly AnyEndpoint[]): Map<string, AnyEndpoint[]> {
   return paths;
 }
 
-function mount(app: Express, path: string, endpoints: readonly AnyEndpoint[], limits: Limits): void {
+function mount(
+  app: Express,
+  path: string,
+  endpoints: readonly AnyEndpoint[],
+  limits: Limits,
+  sealing: Sealing,
+): void {
   for (const endpoint of endpoints) {
-    const body = endpoint.request === null ? [] : jsonBody(limits.bodyLimit_kB);
-    app[endpoint.method](path, entered(endpoint), ...body, question(endpoint, limits));
+    const { request, bodyLimit_kB = 0, refusesDuplicateMembers = false } = endpoint;
+    const limit_kB = Math.max(limits.bodyLimit_kB, bodyLimit_kB);
+    const body = request === null ? [] : jsonBody(limit_kB, { refusesDuplicateMembers });
+    app[endpoint.method](path, entered(endpoint), ...body, question(endpoint, limits, sealing));
   }
   app.all(path, otherMethods(endpoints.map(({ method }) => method)));
 }
@@ -59,13 +77,14 @@ function entered({ operationId }: AnyEndpoint): RequestHandler {
   };
 }
 
-function question(endpoint: AnyEndpoint, limits: Limits): RequestHandler {
+function question(endpoint: AnyEndpoint, limits: Limits, sealing: Sealing): RequestHandler {
   const vary = endpoint.forms === undefined ? undefined : { Vary: "Accept" };
   // Answers are deterministic, so what depends on no request is written once.
   const written = new Map<string, WrittenAnswer>();
-  return (request, response) => {
+  return async (request, response) => {
     const form = formFor(endpoint, request);
-    const answer = written.get(form) ?? write(endpoint, answerOf(endpoint, request.body, limits), form);
+    const answer =
+      written.get(form) ?? write(endpoint, await answerOf(endpoint, request.body, limits, sealing), form);
     if (endpoint.request === null) written.set(form, answer);
     reply(response, 200, answer.mediaType, answer.body, vary);
   };

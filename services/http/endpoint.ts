@@ -1,5 +1,6 @@
 import type { z } from "zod";
 import type { Rule } from "../contract/rule.ts";
+import type { PublicSealKey, SealingKey } from "../review/record/seal-keys.ts";
 import type { ProblemCode } from "./problems.ts";
 import type { Tag } from "./tags.ts";
 
@@ -8,6 +9,15 @@ export interface Limits {
   /** Steps that a solver may take for one number before it answers that it did not converge. */
   readonly maxSteps: number;
   readonly bodyLimit_kB: number;
+}
+
+/** Keys and clock of the service: no answer may depend on them but in a seal. */
+export interface Sealing {
+  /** null where the service was given none; then nothing is sealed. */
+  readonly key: SealingKey | null;
+  /** Public keys whose seals are known: the current one first, then those of earlier generations. */
+  readonly known: readonly PublicSealKey[];
+  now(): Date;
 }
 
 type RequestSchema = z.ZodType | null;
@@ -48,6 +58,10 @@ export interface Endpoint<Request extends RequestSchema, Answer extends z.ZodTyp
   readonly request: Request;
   /** What the request schema cannot say, checked after it. */
   readonly rules?: readonly Rule<Accepted<Request>>[];
+  /** Largest body, where it must be larger than that of other requests. */
+  readonly bodyLimit_kB?: number;
+  /** Whether a JSON object that names a member twice is refused, because what was read goes on record. */
+  readonly refusesDuplicateMembers?: true;
   /** null where there is nothing to count. */
   readonly work: Work<Accepted<Request>> | null;
   readonly answer: Answer;
@@ -57,6 +71,8 @@ export interface Endpoint<Request extends RequestSchema, Answer extends z.ZodTyp
   readonly problems?: readonly ProblemCode[];
   readonly examples: Readonly<Record<string, Example<Written<Request>, z.output<Answer>>>>;
   handler(request: Accepted<Request>, limits: Limits): z.input<Answer>;
+  /** What needs a key or the clock: it completes the answer of the handler, which stays pure. */
+  withSeal?(answer: z.output<Answer>, request: Accepted<Request>, sealing: Sealing): Promise<z.input<Answer>>;
 }
 
 /** An endpoint whose types are forgotten: its own schema stands between a request and its rules and handler. */

@@ -4,9 +4,11 @@ import { mathieuParameters } from "./endpoints/mathieu-parameters.ts";
 import { passband } from "./endpoints/passband.ts";
 import { problems } from "./endpoints/problems.ts";
 import { rfOnly } from "./endpoints/rf-only.ts";
+import { sealKeys } from "./endpoints/seal-keys.ts";
 import { setPoints } from "./endpoints/set-points.ts";
 import { signOff } from "./endpoints/sign-off.ts";
 import { signOffChecks } from "./endpoints/sign-off-checks.ts";
+import { signOffVerification } from "./endpoints/sign-off-verification.ts";
 import { stability } from "./endpoints/stability.ts";
 import { transit } from "./endpoints/transit.ts";
 
@@ -19,7 +21,9 @@ export const ENDPOINTS: readonly AnyEndpoint[] = [
   passband,
   setPoints,
   signOff,
+  signOffVerification,
   signOffChecks,
+  sealKeys,
   about,
   problems,
 ];

@@ -13,6 +13,9 @@ export const ERROR_CODES = {
   "wrong-count": "The array has too few or too many items.",
   "wrong-format": "The text is not of the form that the member takes, or it has control characters in it.",
 
+  "duplicate-member": "An object names the member twice, or under a name that readers treat differently.",
+  "too-deep": "Objects and arrays stand too deep in each other.",
+
   "not-unique": "Two items that must differ in this member share its value.",
   "not-found": "The member names something that the request does not define.",
   "not-above": "The member must be above another member.",

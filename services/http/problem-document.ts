@@ -58,6 +58,10 @@ export class ProblemError extends Error {
   }
 }
 
+export function invalidRequest(errors: ErrorList): ProblemError {
+  return new ProblemError("invalid-request", "`errors` says which members are wrong, and how.", { errors });
+}
+
 export function problemDocument({ code, detail, errors }: ProblemError, requestId: string): Problem {
   const { status, title } = PROBLEMS[code];
   const problem = { type: `/problems#${code}`, title, status, detail, code, requestId };

@@ -1,10 +1,14 @@
+import type { IncomingMessage } from "node:http";
 import express, { type RequestHandler } from "express";
-import { ProblemError } from "./problem-document.ts";
+import { duplicateMembers } from "./duplicate-members.ts";
+import { errorList } from "./error-list.ts";
+import { invalidRequest, ProblemError } from "./problem-document.ts";
 
 const JSON_MEDIA_TYPE = /^application\/json(?:[ \t]*;[ \t]*charset=(?:utf-8|"utf-8"))?[ \t]*$/i;
 
 /** Reads a JSON body of at most `limit_kB`, and nothing that calls itself otherwise. */
-export function jsonBody(limit_kB: number): RequestHandler[] {
+export function jsonBody(limit_kB: number, { refusesDuplicateMembers = false } = {}): RequestHandler[] {
+  const raw = new WeakMap<IncomingMessage, Buffer>();
   return [
     requireJson,
     express.json({
@@ -13,11 +17,16 @@ export function jsonBody(limit_kB: number): RequestHandler[] {
       limit: limit_kB * 1000,
       strict: true,
       // The parser would take a body of no bytes for an empty object.
-      verify: (_request, _response, bytes) => refuseEmpty(bytes.length === 0),
+      verify: (request, _response, bytes) => {
+        refuseEmpty(bytes.length === 0);
+        if (refusesDuplicateMembers) raw.set(request, bytes);
+      },
     }),
     // Without Content-Length and Transfer-Encoding there is nothing to parse.
     (request, _response, next) => {
       refuseEmpty(request.body === undefined);
+      const bytes = raw.get(request);
+      if (bytes !== undefined) refuseDuplicates(bytes);
       next();
     },
   ];
@@ -36,6 +45,12 @@ const requireJson: RequestHandler = (request, _response, next) => {
   }
   next();
 };
+
+function refuseDuplicates(bytes: Buffer): void {
+  // The parser takes a byte order mark off; the scanner would trip over it.
+  const errors = duplicateMembers(bytes.toString("utf8").replace(/^\uFEFF/, ""));
+  if (errors.length > 0) throw invalidRequest(errorList(errors, (item) => item));
+}
 
 function refuseEmpty(empty: boolean): void {
   if (empty) throw new ProblemError("malformed-json", "The body is empty.");

@@ -15,7 +15,7 @@ export function signOffErrors({ instrument, method, criteria }: SignOffRequest):
   ];
 }
 
-function criteriaErrors(criteria: Criteria): ErrorItem[] {
+export function criteriaErrors(criteria: Criteria): ErrorItem[] {
   return CHECKS.flatMap(({ id }) => {
     const criterion = criteria.checks[id];
     if (criterion === undefined) return [];

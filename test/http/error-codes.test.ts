@@ -44,6 +44,16 @@ const REQUESTS: Record<ErrorCode, [path: string, body: unknown, pointer: string]
   ],
   "wrong-count": ["/v1/stability", { ...ofIons, ions: [] }, "/ions"],
   "wrong-format": ["/v1/stability", { ...ofIons, ions: [{ mz: 500, label: "a\u0007" }] }, "/ions/0/label"],
+  "duplicate-member": [
+    "/v1/sign-off",
+    JSON.stringify(SIGN_OFF_EXAMPLE).replace('"polarity":', '"polarity":"negative","polarity":'),
+    "/method/polarity",
+  ],
+  "too-deep": [
+    "/v1/sign-off/verification",
+    `{"record":${'{"result":'.repeat(41)}1${"}".repeat(41)}}`,
+    `/record${"/result".repeat(40)}`,
+  ],
   "not-unique": [
     "/v1/sign-off",
     signOffWith(({ method }) => method.acquisition.push(method.acquisition[0])),

@@ -14,8 +14,12 @@ export const OPERATIONS = {
   setPoints: { method: "POST", path: "/v1/set-points", takesBody: true },
   /** Whether the mass-filter settings of a method can do what it claims, on paper: `POST /v1/sign-off` */
   signOff: { method: "POST", path: "/v1/sign-off", takesBody: true },
+  /** Whether a record still holds: unaltered, sealed, and the same found from the same input today: `POST /v1/sign-off/verification` */
+  signOffVerification: { method: "POST", path: "/v1/sign-off/verification", takesBody: true },
   /** Every check of a sign-off, with its default limits and their basis: `GET /v1/sign-off/checks` */
   signOffChecks: { method: "GET", path: "/v1/sign-off/checks", takesBody: false },
+  /** The public keys of seals, the current one first: `GET /.well-known/jwks.json` */
+  sealKeys: { method: "GET", path: "/.well-known/jwks.json", takesBody: false },
   /** Version, edition of the constants, limits and cautions: `GET /v1/about` */
   about: { method: "GET", path: "/v1/about", takesBody: false },
   /** Every problem the service answers with, and what to do about it: `GET /problems` */

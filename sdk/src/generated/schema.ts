@@ -131,9 +131,29 @@ export interface paths {
         put?: never;
         /**
          * Whether the mass-filter settings of a method can do what it claims, on paper
-         * @description Instrument, method and, where the laboratory has limits of its own, criteria; findings, settings and a verdict come back. Nothing about the rods need be known: a finding that lacks an input is indeterminate and names it. A pass means that every check that counts met its limit, and verdictStatement says what was not shown; it never means that a method works. As text/html the answer is a report to print, with room for a person's signature.
+         * @description Instrument, method and, where the laboratory has limits of its own, criteria; findings, settings and a verdict come back. Nothing about the rods need be known: a finding that lacks an input is indeterminate and names it. A pass means that every check that counts met its limit, and verdictStatement says what was not shown; it never means that a method works. As text/html the answer is a report to print, with room for a person's signature. The record holds input and result with their digests, and a seal where the service was given a key; keep it, and post it to /v1/sign-off/verification whenever the question comes up whether it still holds. A JSON object that names a member twice is refused.
          */
         post: operations["signOff"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/v1/sign-off/verification": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Whether a record still holds: unaltered, sealed, and the same found from the same input today
+         * @description Answers four questions apart. Intact: whether the digests fit the content. Seal: whether a key that this service knows sealed this very content. Reproduced: whether this version finds the same from the input on record, every number within the stated tolerance; digests of two computations are never compared. Criteria: whether the method still meets the criteria on record, or those of the request. A record that was tampered with gets an answer, not a refusal. The public keys stand at /.well-known/jwks.json, so digests and seal can be checked without this service. If the private key is lost, old seals stay valid and new records are sealed with a new key, with the old public key among the trusted ones. If it has leaked, its public key is taken out of the trusted ones: its seals then answer unknown-key, and only copies that the laboratory kept under its own control since before the leak are evidence. A JSON object that names a member twice is refused, and bodies may be larger than elsewhere, so that a record of 2,000 acquisitions fits.
+         */
+        post: operations["signOffVerification"];
         delete?: never;
         options?: never;
         head?: never;
@@ -152,6 +172,26 @@ export interface paths {
          * @description The same list that signs off, judges criteria and names findings. As text/markdown it is a page to file.
          */
         get: operations["signOffChecks"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/.well-known/jwks.json": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * The public keys of seals, the current one first
+         * @description The key that seals today and those of earlier generations that the service was told to trust; empty where it was given none. Keep a copy with the records: a seal can then be verified when the service is gone.
+         */
+        get: operations["sealKeys"];
         put?: never;
         post?: never;
         delete?: never;
@@ -338,7 +378,7 @@ export interface components {
             caution?: components["schemas"]["LowerLimit"];
         };
         CollisionCellStage: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             name: string;
             /**
              * @description discriminator enum property added by openapi-typescript
@@ -361,9 +401,9 @@ export interface components {
             clearing_ms?: number;
         };
         Compound: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             id: string;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             name?: string;
             /** @description A molecular formula, such as C33H40N2O9. */
             formula?: string;
@@ -381,9 +421,9 @@ export interface components {
         };
         /** @description The laboratory's own limits, in place of the defaults. */
         Criteria: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             id: string;
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             revision: string;
             checks: components["schemas"]["CriteriaChecks"];
         };
@@ -466,7 +506,7 @@ export interface components {
             /** @description JSON Pointer (RFC 6901) to the member; empty for the body. */
             pointer: string;
             /** @enum {string} */
-            code: "unknown-member" | "missing-member" | "wrong-type" | "not-whole" | "out-of-range" | "not-one-of" | "wrong-length" | "wrong-count" | "wrong-format" | "not-unique" | "not-found" | "not-above" | "not-below" | "charge-is-zero" | "charge-against-polarity" | "limits-crossed" | "stages-do-not-fit" | "needs-two-pole-pairs" | "dc-not-taken" | "ion-trap-not-computed" | "formula-not-computed" | "waveform-not-computed" | "region-not-computed";
+            code: "unknown-member" | "missing-member" | "wrong-type" | "not-whole" | "out-of-range" | "not-one-of" | "wrong-length" | "wrong-count" | "wrong-format" | "duplicate-member" | "too-deep" | "not-unique" | "not-found" | "not-above" | "not-below" | "charge-is-zero" | "charge-against-polarity" | "limits-crossed" | "stages-do-not-fit" | "needs-two-pole-pairs" | "dc-not-taken" | "ion-trap-not-computed" | "formula-not-computed" | "waveform-not-computed" | "region-not-computed";
             /** @description What was found and what is expected, for a person. */
             detail: string;
         };
@@ -639,11 +679,11 @@ export interface components {
         };
         /** @description What is known of the instrument. Nothing about the rods need be known. */
         Instrument: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             id: string;
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             revision: string;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             label?: string;
             /** @description The rod sets, in the order in which ions meet them. */
             stages: components["schemas"]["Stage"][];
@@ -655,7 +695,7 @@ export interface components {
             formula: string;
             /** @description The adduct in brackets with its charge, such as [M+H]+. */
             adduct: string;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             label?: string;
             /** @enum {string} */
             isotopologue?: "monoisotopic" | "most-abundant";
@@ -665,11 +705,11 @@ export interface components {
             mz: number;
             /** @description Charge number with sign; 1 or -1 by the polarity when absent. Zero is refused. */
             charge?: number;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             label?: string;
         };
         IonGuideStage: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             name: string;
             /**
              * @description discriminator enum property added by openapi-typescript
@@ -683,7 +723,7 @@ export interface components {
         };
         /** @description Refused: a linear formula does not hold in an ion trap. */
         IonTrapStage: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             name: string;
             /**
              * @description discriminator enum property added by openapi-typescript
@@ -691,6 +731,10 @@ export interface components {
              */
             role: "ion-trap";
         } & {
+            [key: string]: unknown;
+        };
+        /** @description The record as it was kept: a SealedRecord, or what has become of one. */
+        KeptRecord: {
             [key: string]: unknown;
         };
         /** @description Parts of a limit, as criteria state them: min, max, minOfWidth and the like. */
@@ -720,7 +764,7 @@ export interface components {
             minCounts?: number;
         };
         MassFilterStage: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             name: string;
             /**
              * @description discriminator enum property added by openapi-typescript
@@ -762,11 +806,11 @@ export interface components {
         };
         /** @description What the method acquires. */
         Method: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             id: string;
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             revision: string;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             label?: string;
             polarity: components["schemas"]["Polarity"];
             timing: components["schemas"]["Timing"];
@@ -786,15 +830,15 @@ export interface components {
             attenuation?: {
                 /** @description What is left of the neighbour, as a fraction. */
                 factor: number;
-                /** @description A text for people, 1 to 2,000 characters, no control characters. */
+                /** @description A text for people, no control characters. */
                 evidence: string;
             };
         };
         /** @description Both filters scan at a fixed distance; mzFrom and mzTo are the precursor's. */
         NeutralLossScan: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             id: string;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             label?: string;
             /** @description id of a compound of the method. */
             compound?: string;
@@ -821,6 +865,11 @@ export interface components {
             productWidth?: components["schemas"]["Width"];
             cell?: components["schemas"]["CellSetting"];
         };
+        /**
+         * @description unknown-format: this version does not know the layout of the record. input-refused: the input on record is no valid request to this version. result-differs: see differences.
+         * @enum {string}
+         */
+        NotReproduced: "unknown-format" | "input-refused" | "result-differs";
         /** @description What could not be judged and does not count in the verdict. */
         NotShown: {
             check: string;
@@ -993,9 +1042,9 @@ export interface components {
         };
         /** @description The filter before the cell scans, the one behind it holds the product. */
         PrecursorScan: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             id: string;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             label?: string;
             /** @description id of a compound of the method. */
             compound?: string;
@@ -1074,9 +1123,9 @@ export interface components {
         };
         /** @description The filter before the cell holds the precursor, the one behind it scans. */
         ProductScan: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             id: string;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             label?: string;
             /** @description id of a compound of the method. */
             compound?: string;
@@ -1105,11 +1154,34 @@ export interface components {
             productWidth?: components["schemas"]["Width"];
             cell?: components["schemas"]["CellSetting"];
         };
+        /** @description A public key that verifies seals (RFC 7517, RFC 8037). */
+        PublicSealKey: {
+            /** @constant */
+            kty: "OKP";
+            /** @constant */
+            crv: "Ed25519";
+            /** @description The public key, base64url. */
+            x: string;
+            /** @description RFC 7638 thumbprint, SHA-256, base64url. */
+            kid: string;
+            /** @constant */
+            use: "sig";
+            /** @constant */
+            alg: "Ed25519";
+        };
         RangeLimit: {
             /** @description Largest value, in the unit of the finding. */
             max: number;
             /** @description Smallest value, in the unit of the finding. */
             min?: number;
+        };
+        RecordDifference: {
+            /** @description JSON Pointer into the record; /result/findings/- is a finding that is not on record. */
+            pointer: string;
+            /** @description Absent where the record has no such member. */
+            recorded?: components["schemas"]["ShownValue"];
+            /** @description Absent where this version has no such member. */
+            recomputed?: components["schemas"]["ShownValue"];
         };
         RecordDigests: {
             /** @description SHA-256 of the canonical JSON (RFC 8785) of input, in hexadecimal digits. */
@@ -1229,9 +1301,9 @@ export interface components {
             waveform?: components["schemas"]["Waveform"];
         };
         Scan: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             id: string;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             label?: string;
             /** @description id of a compound of the method. */
             compound?: string;
@@ -1270,6 +1342,15 @@ export interface components {
             /** @description JWS in compact form (RFC 7515), alg Ed25519 (RFC 9864), kid the RFC 7638 thumbprint of the key. Its payload is the canonical JSON of the digest that is sealed, in recordDigest, and of the time of sealing, in sealedAt (ISO 8601, UTC). */
             jws: string;
         };
+        /** @description A JWK set (RFC 7517). */
+        SealKeySet: {
+            keys: components["schemas"]["PublicSealKey"][];
+        };
+        /**
+         * @description valid: made with a key that this service knows, for this very content. invalid: altered, or made for another content. unknown-key: made with a key that this service does not know, so nothing can be said. absent: never sealed.
+         * @enum {string}
+         */
+        SealState: "valid" | "invalid" | "unknown-key" | "absent";
         /** @description A sign-off that can be verified years later. It holds no clock but the one in the seal: the same request and version give the same record. */
         SealedRecord: {
             /**
@@ -1285,9 +1366,9 @@ export interface components {
             seal: components["schemas"]["Seal"] | null;
         };
         SelectedIon: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             id: string;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             label?: string;
             /** @description id of a compound of the method. */
             compound?: string;
@@ -1381,6 +1462,8 @@ export interface components {
             /** @description Low-mass cutoff of the collision cell for this ion. */
             cutoffMz: number | null;
         };
+        /** @description A value; objects, arrays and long texts as the start of their JSON. */
+        ShownValue: string | number | boolean | null;
         SignOffAnswer: {
             verdict: components["schemas"]["Verdict"];
             verdictStatement: string;
@@ -1556,9 +1639,9 @@ export interface components {
             }[];
         };
         Transition: {
-            /** @description A name of the laboratory's own, 1 to 100 characters, no control characters. */
+            /** @description A name of the laboratory's own, no control characters. */
             id: string;
-            /** @description A short text for people, 1 to 200 characters, no control characters. */
+            /** @description A short text for people, no control characters. */
             label?: string;
             /** @description id of a compound of the method. */
             compound?: string;
@@ -1618,6 +1701,41 @@ export interface components {
          * @enum {string}
          */
         Verdict: "pass" | "caution" | "fail" | "indeterminate";
+        VerificationAnswer: {
+            /** @description What was found, for a person. */
+            statement: string;
+            /** @description Whether the digests fit the content. Without a valid seal that shows no more than that nothing was altered by accident: whoever alters a record can make new digests. */
+            intact: boolean;
+            /** @description JSON Pointers of what does not fit; empty where intact. */
+            altered: string[];
+            /** @description SHA-256 that the content on record has today, made anew: what a seal of it must name. */
+            recordDigest: string;
+            seal: components["schemas"]["SealState"];
+            /** @description ISO 8601, UTC; null unless the seal is valid. */
+            sealedAt: string | null;
+            /** @description RFC 7638 thumbprint of the key that the seal names. */
+            keyId: string | null;
+            /** @description Whether this version finds the same from the same input: every number within the tolerance, everything else but sentences exactly. */
+            reproduced: boolean;
+            notReproducedBecause: components["schemas"]["NotReproduced"] | null;
+            differences: components["schemas"]["RecordDifference"][];
+            differencesOmitted: number;
+            /** @description Relative to the larger of two numbers. A margin is measured on the scale of the value and the bounds it is the difference of, a difference of two m/z on that of the m/z. */
+            tolerance: number;
+            /** @description Verdict that this version comes to by the criteria on record; null where it can come to none. */
+            verdict: components["schemas"]["Verdict"] | null;
+            /** @description Verdict by the criteria of this request; null where it states none. */
+            verdictByCriteria: components["schemas"]["Verdict"] | null;
+            /** @description Whether the verdict, by the criteria of this request or else by those on record, is pass or caution. */
+            stillMeetsCriteria: boolean | null;
+            /** @description What recomputed. */
+            engine: components["schemas"]["Engine"];
+        };
+        VerificationRequest: {
+            record: components["schemas"]["KeptRecord"];
+            /** @description Criteria to hold the method to today, in place of those on record. */
+            criteria?: components["schemas"]["Criteria"];
+        };
         /** @description How the voltages of the answer are to be read. */
         VoltageConvention: {
             rf: {
@@ -1657,7 +1775,7 @@ export interface components {
         };
         /** @description The check no longer counts in the verdict; its findings keep their outcome and the waiver is listed. */
         Waiver: {
-            /** @description A text for people, 1 to 2,000 characters, no control characters. */
+            /** @description A text for people, no control characters. */
             reason: string;
             /** @description Where the laboratory's decision is kept. */
             reference: string;
@@ -2351,6 +2469,96 @@ export interface operations {
             };
         };
     };
+    signOffVerification: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** @description Whether a record still holds: unaltered, sealed, and the same found from the same input today */
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["VerificationRequest"];
+            };
+        };
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["VerificationAnswer"];
+                };
+            };
+            /**
+             * @description `malformed-json`: The body is empty, is not well-formed JSON in UTF-8, or its top level is no object.
+             *
+             *     `interrupted-body`: The connection ended, or fewer bytes came than Content-Length announced.
+             */
+            400: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `body-too-large`: The body is larger than the limit that GET /v1/about shows. */
+            413: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `unsupported-media-type`: Content-Type is not application/json (with or without charset=utf-8), or the body is compressed. */
+            415: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where. */
+            422: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     signOffChecks: {
         parameters: {
             query?: never;
@@ -2369,6 +2577,48 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["Catalogue"];
                     "text/markdown": string;
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    sealKeys: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SealKeySet"];
+                    "application/jwk-set+json": string;
                 };
             };
             /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */

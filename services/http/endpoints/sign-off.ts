@@ -1,5 +1,6 @@
 import { MAX_ACQUISITIONS } from "../../review/method.ts";
 import { recordedSignOff } from "../../review/record/record.ts";
+import { sealedRecord } from "../../review/record/sealed-record.ts";
 import { reportHtml } from "../../review/report/report.ts";
 import { SignOffAnswer } from "../../review/sign-off-answer.ts";
 import { signOffErrors } from "../../review/sign-off-rules.ts";
@@ -7,6 +8,7 @@ import { SignOffRequest } from "../../review/sign-off-schema.ts";
 import { defineEndpoint } from "../endpoint.ts";
 import { ENGINE } from "../engine.ts";
 import { SIGN_OFF_EXAMPLE } from "../examples/sign-off.ts";
+import { METHOD_BODY_LIMIT_KB } from "../limits.ts";
 
 export const signOff = defineEndpoint({
   operationId: "signOff",
@@ -16,8 +18,11 @@ export const signOff = defineEndpoint({
   summary: "Whether the mass-filter settings of a method can do what it claims, on paper",
   description:
     "Instrument, method and, where the laboratory has limits of its own, criteria; findings, settings and a verdict come back. Nothing about the rods need be known: a finding that lacks an input is indeterminate and names it. " +
-    "A pass means that every check that counts met its limit, and verdictStatement says what was not shown; it never means that a method works. As text/html the answer is a report to print, with room for a person's signature.",
+    "A pass means that every check that counts met its limit, and verdictStatement says what was not shown; it never means that a method works. As text/html the answer is a report to print, with room for a person's signature. " +
+    "The record holds input and result with their digests, and a seal where the service was given a key; keep it, and post it to /v1/sign-off/verification whenever the question comes up whether it still holds. A JSON object that names a member twice is refused.",
   request: SignOffRequest,
+  bodyLimit_kB: METHOD_BODY_LIMIT_KB,
+  refusesDuplicateMembers: true,
   rules: [signOffErrors],
   work: {
     unit: "acquisitions",
@@ -37,4 +42,8 @@ export const signOff = defineEndpoint({
     },
   },
   handler: (request) => recordedSignOff(request, ENGINE),
+  withSeal: async (answer, _request, { key, now }) => ({
+    ...answer,
+    record: await sealedRecord(answer.record, key, now),
+  }),
 });

@@ -6,7 +6,7 @@ import { SealState } from "./seal.ts";
 
 export const VerificationRequest = z
   .strictObject({
-    record: z.record(z.string(), z.unknown()).meta({
+    record: z.looseObject({}).meta({
       id: "KeptRecord",
       description: "The record as it was kept: a SealedRecord, or what has become of one.",
     }),
@@ -50,6 +50,9 @@ export const VerificationAnswer = z
     altered: z
       .array(z.string())
       .meta({ description: "JSON Pointers of what does not fit; empty where intact." }),
+    recordDigest: z.string().meta({
+      description: "SHA-256 that the content on record has today, made anew: what a seal of it must name.",
+    }),
     seal: SealState,
     sealedAt: z.string().nullable().meta({ description: "ISO 8601, UTC; null unless the seal is valid." }),
     keyId: z.string().nullable().meta({ description: "RFC 7638 thumbprint of the key that the seal names." }),

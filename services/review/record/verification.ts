@@ -15,11 +15,12 @@ type Unsealed = Omit<VerificationAnswer, keyof SealFinding | "statement">;
 
 /** Everything a verification finds out without a key. */
 export function verifyContent({ record, criteria }: VerificationRequest, engine: Engine): Unsealed {
-  const { altered } = integrityOf(record);
+  const { altered, recordDigest } = integrityOf(record);
   const { because, differences, verdict, verdictByCriteria } = reproductionOf(record, criteria);
   return {
     intact: altered.length === 0,
     altered: [...altered],
+    recordDigest,
     reproduced: because === null,
     notReproducedBecause: because,
     differences: differences.slice(0, MOST_DIFFERENCES).map((difference) => ({ ...difference })),
@@ -36,13 +37,18 @@ function meets(verdict: Reproduction["verdict"]): boolean | null {
   return verdict === null ? null : verdict === "pass" || verdict === "caution";
 }
 
-/** Whether the seal of a record is one of these keys', made for this very content. */
-export function verifySeal(record: KeptRecord, keys: readonly PublicSealKey[]): Promise<SealFinding> {
-  const { seal } = record;
+export const NO_SEAL: SealFinding = { seal: "absent", sealedAt: null, keyId: null };
+
+/** Whether the seal of a record is one of these keys', made for the content with this digest. */
+export function verifySeal(
+  { seal }: KeptRecord,
+  recordDigest: string,
+  keys: readonly PublicSealKey[],
+): Promise<SealFinding> {
   const absent = seal === null || seal === undefined;
   // A seal that is something else than an object with a JWS in it was a seal once, or wants to be taken for one.
   const jws = absent ? null : (membersOf(seal).jws ?? "");
-  return sealFindingOf(jws, integrityOf(record).recordDigest, "rodset-record-seal", keys);
+  return sealFindingOf(jws, recordDigest, "rodset-record-seal", keys);
 }
 
 /** The answer with a sentence that says what it comes to, in the order in which a reader must know it. */
