@@ -151,7 +151,9 @@ export function bandBegin(plane: WavePlane, band: number, maxSteps: number): Pla
 
 function lowestBegin(plane: WavePlane, maxSteps: number): EdgePlace {
   if (plane.sign * (plane.ratio + meanLevel(plane.wave)) >= 0) return { kind: "origin" };
-  return edgeAfter(plane, { solution: "C", order: 0 }, 0, maxSteps);
+  const edge = edgeAfter(plane, { solution: "C", order: 0 }, 0, maxSteps);
+  // A mean so small that its q underflows is none.
+  return edge.kind === "edge" && edge.q === 0 ? { kind: "origin" } : edge;
 }
 
 /** Where a band ends, β = band + 1; as bandBegin. */

@@ -125,7 +125,14 @@ export function closingWave(
   const { ratio, wave } = family.at(value);
   const sign = ratio + meanLevel(wave) > 0 ? -1 : 1;
   const q = placeOf(bandBegin({ wave, ratio, sign }, 0, maxSteps), search);
-  if (!(q <= WAVE_EDGE_Q_MAX)) return { kind: "not-converged", steps: search.steps };
+  const end = Math.min(
+    placeOf(bandEnd({ wave, ratio, sign: 1 }, 0, maxSteps), search),
+    placeOf(bandEnd({ wave, ratio, sign: -1 }, 0, maxSteps), search),
+  );
+  if (!search.converged) return { kind: "not-converged", steps: search.steps };
+  if (!(q <= WAVE_EDGE_Q_MAX && end <= WAVE_EDGE_Q_MAX)) {
+    return { kind: "impossible", reason: "outside-computed-domain" };
+  }
   return { kind: "closed", ratio, wave, q, steps: search.steps };
 }
 
@@ -152,10 +159,9 @@ export function waveForResolution(
   const { ratio, wave } = family.at(value);
   const found = waveWindowsOnScanLine(ratio, wave, "first", maxSteps);
   const steps = search.steps + found.steps;
-  const window = found.kind === "windows" ? found.windows[0] : undefined;
-  if (window === undefined) return { kind: "not-converged", steps };
-  if (window.high === null || window.low === null) {
-    return { kind: "impossible", reason: "outside-computed-domain" };
-  }
+  if (found.kind === "not-converged") return { kind: "not-converged", steps };
+  const [window] = found.windows;
+  // Where the ends of the bands lie beyond the search, the root found is but the place where they come into sight.
+  if (!window?.low || !window.high) return { kind: "impossible", reason: "outside-computed-domain" };
   return { kind: "tuned", ratio, wave, window, steps };
 }
