@@ -6,6 +6,7 @@ import { drain, listen } from "./listening.ts";
 import { createLogger } from "./logger.ts";
 import { readOpenApiDocument } from "./openapi-document.ts";
 import { operations, type Readiness } from "./operations.ts";
+import { readSealing } from "./seal-key-files.ts";
 import { readSettings } from "./settings.ts";
 
 try {
@@ -18,6 +19,7 @@ try {
       endpoints: ENDPOINTS,
       openApiDocument: readOpenApiDocument(),
       limits: limitsOf(settings),
+      sealing: await readSealing(settings),
       logger,
     }),
   );

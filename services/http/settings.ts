@@ -36,6 +36,19 @@ export const VARIABLES = {
     format: "a whole number from 0 to 600",
     read: wholeNumber(0, 600),
   },
+  RODSET_SEAL_KEY_FILE: {
+    means:
+      "File with the private Ed25519 key that seals records: PKCS #8 in PEM, or a JWK. Only its owner may read it.",
+    fallback: "none",
+    format: "the path of a file, or none",
+    read: pathOfFile,
+  },
+  RODSET_SEAL_TRUSTED_KEYS_FILE: {
+    means: "File with a JWK set of the public keys of earlier seals, which stay verifiable.",
+    fallback: "none",
+    format: "the path of a file, or none",
+    read: pathOfFile,
+  },
 } as const satisfies Record<string, Variable<unknown>>;
 
 interface Variable<Value> {
@@ -55,6 +68,8 @@ export interface Settings {
   readonly logLevel: (typeof LOG_LEVELS)[number];
   readonly bodyLimit_kB: number;
   readonly drain_s: number;
+  readonly sealKeyFile: string;
+  readonly sealTrustedKeysFile: string;
 }
 
 /** Names every variable that is wrong, the format it wants and where to read about it. */
@@ -86,9 +101,15 @@ export function readSettings(environment: Readonly<Record<string, string | undef
     logLevel: valueAt("RODSET_LOG_LEVEL", VARIABLES.RODSET_LOG_LEVEL),
     bodyLimit_kB: valueAt("RODSET_BODY_LIMIT_KB", VARIABLES.RODSET_BODY_LIMIT_KB),
     drain_s: valueAt("RODSET_DRAIN_S", VARIABLES.RODSET_DRAIN_S),
+    sealKeyFile: valueAt("RODSET_SEAL_KEY_FILE", VARIABLES.RODSET_SEAL_KEY_FILE),
+    sealTrustedKeysFile: valueAt("RODSET_SEAL_TRUSTED_KEYS_FILE", VARIABLES.RODSET_SEAL_TRUSTED_KEYS_FILE),
   };
   if (complaints.length > 0) throw new SettingsError(complaints);
   return settings;
+}
+
+function pathOfFile(text: string): string | null {
+  return /^[^\p{Cc}]{1,4096}$/u.test(text) ? text : null;
 }
 
 function wholeNumber(minimum: number, maximum: number): (text: string) => number | null {

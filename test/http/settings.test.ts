@@ -22,6 +22,8 @@ describe("the settings", () => {
       logLevel: "info",
       bodyLimit_kB: 512,
       drain_s: 10,
+      sealKeyFile: "none",
+      sealTrustedKeysFile: "none",
     });
   });
 
@@ -33,6 +35,8 @@ describe("the settings", () => {
       RODSET_LOG_LEVEL: "silent",
       RODSET_BODY_LIMIT_KB: "16384",
       RODSET_DRAIN_S: "0",
+      RODSET_SEAL_KEY_FILE: "/run/secrets/seal.pem",
+      RODSET_SEAL_TRUSTED_KEYS_FILE: "trusted.json",
     };
     expect(readSettings(environment)).toEqual({
       host: "0.0.0.0",
@@ -41,6 +45,8 @@ describe("the settings", () => {
       logLevel: "silent",
       bodyLimit_kB: 16384,
       drain_s: 0,
+      sealKeyFile: "/run/secrets/seal.pem",
+      sealTrustedKeysFile: "trusted.json",
     });
   });
 
@@ -54,6 +60,8 @@ describe("the settings", () => {
     ["RODSET_LOG_LEVEL", "INFO", "one of debug, info, warn, error, silent"],
     ["RODSET_BODY_LIMIT_KB", "0", "a whole number from 1 to 16384"],
     ["RODSET_DRAIN_S", "601", "a whole number from 0 to 600"],
+    ["RODSET_SEAL_KEY_FILE", "", "the path of a file, or none"],
+    ["RODSET_SEAL_TRUSTED_KEYS_FILE", "a\nb", "the path of a file, or none"],
   ])("name %s when it is %j, the format it wants, and where to read", (name, text, format) => {
     expect(complaintAbout({ [name]: text })).toBe(
       `${name} is ${JSON.stringify(text)}; it must be ${format}.\nThe variables are described in README.md, section Settings.`,

@@ -28,7 +28,7 @@ export const signOffVerification = defineEndpoint({
   description:
     "Answers four questions apart. Intact: whether the digests fit the content. Seal: whether a key that this service knows sealed this very content. Reproduced: whether this version finds the same from the input on record, every number within the stated tolerance; digests of two computations are never compared. Criteria: whether the method still meets the criteria on record, or those of the request. A record that was tampered with gets an answer, not a refusal. " +
     "The public keys stand at /.well-known/jwks.json, so digests and seal can be checked without this service. If the private key is lost, old seals stay valid and new records are sealed with a new key, with the old public key among the trusted ones. If it has leaked, its public key is taken out of the trusted ones: its seals then answer unknown-key, and only copies that the laboratory kept under its own control since before the leak are evidence. " +
-    "A JSON object that names a member twice is refused, and bodies may be larger than elsewhere, so that a record of 2,000 acquisitions fits.",
+    "A JSON object that names a member twice is refused; bodies may be larger than elsewhere, so that a record of 2,000 acquisitions fits.",
   request: VerificationRequest,
   bodyLimit_kB: RECORD_BODY_LIMIT_KB,
   refusesDuplicateMembers: true,
