@@ -1,14 +1,58 @@
 import type { RequestOf } from "@rodset/sdk";
 
+type Use = "quantifier" | "qualifier";
+
+/** Protonated molecules and fragments of drugs in the open literature; the set values are what the laboratory typed. */
+const TRANSITIONS: readonly (readonly [
+  id: string,
+  use: Use,
+  compound: string,
+  precursorMz: number,
+  setPrecursorMz: number,
+  productMz: number,
+  setProductMz: number,
+])[] = [
+  ["SMX-1", "quantifier", "sulfamethoxazole", 254.0594, 254.06, 156.0114, 156.01],
+  ["SMX-2", "qualifier", "sulfamethoxazole", 254.0594, 254.06, 108.0444, 108.04],
+  ["SDZ-1", "quantifier", "sulfadiazine", 251.0597, 251.06, 156.0114, 156.01],
+  ["SDZ-2", "qualifier", "sulfadiazine", 251.0597, 251.06, 65.0386, 65.04],
+  ["TMP-1", "quantifier", "trimethoprim", 291.1452, 291.15, 230.1162, 230.12],
+  ["TMP-2", "qualifier", "trimethoprim", 291.1452, 291.15, 123.0665, 123.18],
+  ["ENR-1", "quantifier", "enrofloxacin", 360.1718, 360.17, 316.182, 316.18],
+  ["ENR-2", "qualifier", "enrofloxacin", 360.1718, 360.17, 245.1085, 245.11],
+];
+
+const halfHeight = (value: number) => ({ value, as: "mz", at: "half-height" }) as const;
+
+function transition([
+  id,
+  use,
+  label,
+  precursorMz,
+  setPrecursorMz,
+  productMz,
+  setProductMz,
+]: (typeof TRANSITIONS)[number]) {
+  return {
+    id,
+    kind: "transition",
+    use,
+    precursor: { mz: precursorMz, label },
+    setPrecursorMz,
+    precursorWidth: halfHeight(0.7),
+    product: { mz: productMz },
+    setProductMz,
+    productWidth: halfHeight(0.7),
+    dwell_ms: 20,
+    pause_ms: 5,
+  } as const;
+}
+
 /**
  * An invented scenario: the water laboratory of the town of Ostmoor looks for veterinary drugs in well water, on a triple
  * quadrupole of which it knows only the tune report and the cell's cutoff. One set m/z was typed a little off, and one
  * qualifier was taken over from a method with a lower cutoff.
  */
-const halfHeight = (value: number) => ({ value, as: "mz", at: "half-height" }) as const;
-
-const dwell = { dwell_ms: 20, pause_ms: 5 } as const;
-
 export const demoRequest: RequestOf<"signOff"> = {
   instrument: {
     id: "ostmoor-bench-3",
@@ -58,39 +102,6 @@ export const demoRequest: RequestOf<"signOff"> = {
     polarity: "positive",
     timing: { mode: "dwell" },
     chromatographicPeakWidth: { value_s: 6, at: "base" },
-    acquisition: [
-      transition("SMX-1", "quantifier", { mz: 254.0594, label: "sulfamethoxazole" }, 254.06, { mz: 156.0114 }, 156.01),
-      transition("SMX-2", "qualifier", { mz: 254.0594, label: "sulfamethoxazole" }, 254.06, { mz: 108.0444 }, 108.04),
-      transition("SDZ-1", "quantifier", { mz: 251.0597, label: "sulfadiazine" }, 251.06, { mz: 156.0114 }, 156.01),
-      transition("SDZ-2", "qualifier", { mz: 251.0597, label: "sulfadiazine" }, 251.06, { mz: 65.0386 }, 65.04),
-      transition("TMP-1", "quantifier", { mz: 291.1452, label: "trimethoprim" }, 291.15, { mz: 230.1162 }, 230.12),
-      transition("TMP-2", "qualifier", { mz: 291.1452, label: "trimethoprim" }, 291.15, { mz: 123.0665 }, 123.2),
-      transition("ENR-1", "quantifier", { mz: 360.1718, label: "enrofloxacin" }, 360.17, { mz: 316.182 }, 316.18),
-      transition("ENR-2", "qualifier", { mz: 360.1718, label: "enrofloxacin" }, 360.17, { mz: 245.1085 }, 245.11),
-    ],
+    acquisition: TRANSITIONS.map(transition),
   },
 };
-
-type Transition = Extract<RequestOf<"signOff">["method"]["acquisition"][number], { kind: "transition" }>;
-
-function transition(
-  id: string,
-  use: "quantifier" | "qualifier",
-  precursor: Transition["precursor"],
-  setPrecursorMz: number,
-  product: Transition["product"],
-  setProductMz: number,
-): Transition {
-  return {
-    id,
-    kind: "transition",
-    use,
-    precursor,
-    setPrecursorMz,
-    precursorWidth: halfHeight(0.7),
-    product,
-    setProductMz,
-    productWidth: halfHeight(0.7),
-    ...dwell,
-  };
-}
