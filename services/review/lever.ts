@@ -69,10 +69,11 @@ export function bothPassIf(one: PassesIf | null, other: PassesIf | null): Passes
 }
 
 const HALVINGS = 40;
+const SAMPLES = 8;
 
 /**
  * The ends of the interval around `inside`, which passes, between `low` and `high`, found by halving. Both ends have
- * been seen to pass.
+ * been seen to pass, and so have samples in between: what passes need not be one interval.
  */
 export function passingInterval(
   passes: (value: number) => boolean,
@@ -84,7 +85,7 @@ export function passingInterval(
 }
 
 function lastPassing(passes: (value: number) => boolean, inside: number, end: number): number {
-  if (passes(end)) return end;
+  if (passes(end)) return beforeGap(passes, inside, end);
   let passing = inside;
   let failing = end;
   for (let halving = 0; halving < HALVINGS; halving++) {
@@ -93,5 +94,14 @@ function lastPassing(passes: (value: number) => boolean, inside: number, end: nu
     if (passes(middle)) passing = middle;
     else failing = middle;
   }
-  return passing;
+  return beforeGap(passes, inside, passing);
+}
+
+/** The same end, or one nearer to `inside` where a sample on the way to it fails. */
+function beforeGap(passes: (value: number) => boolean, inside: number, end: number): number {
+  for (let sample = 1; sample < SAMPLES; sample++) {
+    const between = inside + ((end - inside) * sample) / SAMPLES;
+    if (!passes(between)) return lastPassing(passes, inside, between);
+  }
+  return end;
 }

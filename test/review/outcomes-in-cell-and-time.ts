@@ -54,7 +54,7 @@ const depth = (quantity: string): QuantityOutcomes => ({
   requests: {
     pass: deep(100, 0.1),
     caution: deep(100, 1),
-    fail: deep(100, 5),
+    fail: deep(100, 3),
     indeterminate: cell({}),
     "not-applicable": deep(300, 1),
   },

@@ -5,6 +5,7 @@ import type { Bounds, PassesIf } from "../finding.ts";
 import { bothPassIf, leverThrough, passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimitByTolerance } from "../limit.ts";
 import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
+import { NO_DC_OVER_RF, NO_VOLTS } from "../resolve/negligible.ts";
 import type { Filtering } from "../resolve/resolved-method.ts";
 import {
   centreOf,
@@ -41,15 +42,14 @@ export const apexMargin = defineCheck({
       const pass = boundsOf(limits.pass, undefined, tolerance);
       const caution = boundsOf(limits.caution, undefined, tolerance);
       const settings = settingsAt(method, filter);
-      const observation = worstOfStage(
+      const onLine = settings.some(({ window }) => window.kind !== "unknown" && window.drive !== null);
+      return worstOfStage(
         { quantity: "margin-to-apex", unit: "[ppm]", subject: { pointer, stage: stage.name } },
         settings,
         `The method sets no window in ${stage.name} that has a scan line.`,
         (setting) => marginToApex(setting, pass, caution),
+        onLine ? () => passesIfByOneRow(settings, pass) : undefined,
       );
-      if (observation.kind !== "value" && observation.kind !== "impossible") return observation;
-      const onLine = settings.some(({ window }) => window.kind !== "unknown" && window.drive !== null);
-      return onLine ? { ...observation, passesIf: () => passesIfByOneRow(settings, pass) } : observation;
     }),
 });
 
@@ -61,9 +61,9 @@ function marginToApex(setting: Filtering, pass: Bounds, caution: Bounds): Readin
   if (window.drive !== null) {
     const { drive } = window;
     const { rfVolts, dcVolts } = drive.volts;
-    if (rfVolts <= 0) return notApplicable(`${name} has no RF voltage and so no scan line.`);
+    if (rfVolts < NO_VOLTS) return notApplicable(`${name} has no RF voltage and so no scan line.`);
     const passesIf = () => passesIfOnRow(drive, drive.row, pass);
-    if (dcVolts <= 0) {
+    if (dcVolts < NO_DC_OVER_RF * rfVolts) {
       const statement = `${name} at m/z ${setMz}: without DC of the right sign nothing is selected.`;
       return { kind: "impossible", ...judged, evidence: "computed", passesIf, statement };
     }
@@ -127,7 +127,10 @@ function passesIfByOneRow(settings: readonly Filtering[], pass: Bounds): PassesI
 }
 
 function passes({ rfVolts, dcVolts }: WindowDrive["volts"], pass: Bounds): boolean {
-  return dcVolts > 0 && (pass.min === null || apexMarginOf(dcVolts / rfVolts) * 1e6 >= pass.min);
+  return (
+    dcVolts >= NO_DC_OVER_RF * rfVolts &&
+    (pass.min === null || apexMarginOf(dcVolts / rfVolts) * 1e6 >= pass.min)
+  );
 }
 
 function passesIfWider(window: KnownWindow, pass: Bounds): PassesIf | null {

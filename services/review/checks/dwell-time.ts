@@ -110,14 +110,11 @@ function passesIfLonger(
   }
   const needed = { min: rate === undefined ? min : (min * 1e3) / rate, max: null };
   const { timing } = method;
-  if (moment === null || timing.mode === "dwell") {
-    return passesIfWithin(leverOn(`${pointer}/dwell_ms`, "ms", Dwell_ms), needed);
-  }
-  const shortest = leverOn("/method/timing/dwellMin_ms", "ms", {
-    minValue: 0,
-    maxValue: timing.dwellMax_ms,
-  });
-  const longest = leverOn("/method/timing/dwellMax_ms", "ms", Dwell_ms);
-  // Where the cycle would leave more than the longest dwell time, that alone holds it back.
-  return passesIfWithin(dwell_ms < timing.dwellMax_ms ? shortest : longest, needed);
+  const own = leverOn(`${pointer}/dwell_ms`, "ms", Dwell_ms);
+  if (moment === null || timing.mode === "dwell") return passesIfWithin(own, needed);
+  // The shortest dwell time may rise to the longest; beyond that the acquisition needs one of its own.
+  const range = { minValue: 0, maxValue: timing.dwellMax_ms };
+  return (
+    passesIfWithin(leverOn("/method/timing/dwellMin_ms", "ms", range), needed) ?? passesIfWithin(own, needed)
+  );
 }

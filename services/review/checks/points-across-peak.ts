@@ -4,6 +4,7 @@ import type { Bounds, PassesIf } from "../finding.ts";
 import { leverOn, passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
 import { lacking, notApplicable, type Reading } from "../observation.ts";
+import { NO_TIME_MS } from "../resolve/negligible.ts";
 import type { ResolvedMethod } from "../resolve/resolved-method.ts";
 import { type Moment, momentText, roundOf } from "../resolve/schedule.ts";
 import { digits } from "../statement.ts";
@@ -48,7 +49,7 @@ function pointsAtBusiest(resolved: ResolvedMethod, pass: Bounds, caution: Bounds
     return lacking("The number of points across a peak", missing);
   const busiest = longestRound(schedule.moments);
   const cycle_ms = busiest.cycle_ms!;
-  if (cycle_ms === 0) return notApplicable("A round takes no time: dwell times and pauses are 0.");
+  if (cycle_ms < NO_TIME_MS) return notApplicable("A round takes no time: dwell times and pauses are 0.");
   const base_ms = width.value_s * 1e3 * (width.at === "base" ? 1 : BASE_OVER_HALF_HEIGHT);
   const value = base_ms / cycle_ms;
   return {

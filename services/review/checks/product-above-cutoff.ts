@@ -4,6 +4,7 @@ import type { Bounds } from "../finding.ts";
 import { passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
 import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
+import { NO_CUTOFF_MZ } from "../resolve/negligible.ts";
 import type { Guiding } from "../resolve/resolved-method.ts";
 import { digits } from "../statement.ts";
 
@@ -63,12 +64,12 @@ function overCutoff(guiding: Guiding, pass: Bounds, caution: Bounds): Reading {
       pass.min === null || pass.min <= 0
         ? null
         : passesIfWithin(cutoffLever, {
-            min: cutoffMz === 0 ? (product.mz * WEAK_CONFINEMENT_Q) / RF_ONLY_LIMIT_Q : null,
+            min: cutoffMz < NO_CUTOFF_MZ ? (product.mz * WEAK_CONFINEMENT_Q) / RF_ONLY_LIMIT_Q : null,
             max: product.mz / pass.min,
           }),
   };
   // Without RF nothing is confined, but then there is no cutoff either.
-  if (cutoffMz === 0) {
+  if (cutoffMz < NO_CUTOFF_MZ) {
     return { kind: "impossible", ...judged, statement: `${name} has no RF voltage: no ion is confined.` };
   }
   const value = product.mz / cutoffMz;

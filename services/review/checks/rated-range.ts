@@ -33,9 +33,9 @@ export function ratedRange(method: ResolvedMethod, filter: Placed<MassFilterStag
         statement: `m/z ${setMz} lies ${digits(Math.abs(value), 4)} ${value < 0 ? "outside" : "inside"} the nearer end of the range ${rated.mzLow} to ${rated.mzHigh} for which ${name} is rated.`,
       };
     },
+    () => passesIfInside(settings, rated, filter.pointer),
   );
-  if (observation.kind !== "value") return [observation];
-  return [{ ...observation, passesIf: () => passesIfInside(settings, rated, filter.pointer) }];
+  return [observation];
 }
 
 /** A set m/z that is the only one outside may move inside; else an end of the range would have to lie further out. */

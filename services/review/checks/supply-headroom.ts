@@ -7,6 +7,7 @@ import type { MassFilterStage, Stage, Supply } from "../instrument.ts";
 import { passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
 import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
+import { NO_VOLTS } from "../resolve/negligible.ts";
 import type { Filtering, Guiding, Placed, ResolvedMethod } from "../resolve/resolved-method.ts";
 import { dcLever, rfLever } from "../resolve/volts-lever.ts";
 import { centreOf, standsForEdges, widthOf } from "../resolve/window.ts";
@@ -170,7 +171,8 @@ function headroomOver(
         : passesIfWithin(lever, { min: volts / (1 - pass.min / 100), max: null }),
     statement: sentence(digits(statedFor(volts), 5), digits(statedFor(largest), 5)),
   };
-  if (largest === 0) return { kind: "impossible", ...judged };
+  if (volts < NO_VOLTS && largest < NO_VOLTS) return notApplicable("No voltage is needed and none is there.");
+  if (largest < NO_VOLTS) return { kind: "impossible", ...judged };
   return { kind: "value", value: (100 * (largest - volts)) / largest, ...judged };
 }
 

@@ -1,6 +1,7 @@
 import { ratioForResolution } from "../../physics/set-point.ts";
 import type { PassesIf } from "../finding.ts";
 import { type Lever, passesIfWithin, passingInterval } from "../lever.ts";
+import { NO_VOLTS } from "../resolve/negligible.ts";
 import { windowOfDrive } from "../resolve/operating-point.ts";
 import type { Filtering } from "../resolve/resolved-method.ts";
 import { centreOf, type KnownWindow, type Window, widthOf } from "../resolve/window.ts";
@@ -69,7 +70,7 @@ export function passesIfDcChanges({ window, filter, setMz }: Filtering, passes: 
   const { drive } = window;
   const { rfVolts } = drive.volts;
   const lever: Lever | null = drive.dcLever(drive.row);
-  if (lever === null || rfVolts <= 0) return null;
+  if (lever === null || rfVolts < NO_VOLTS) return null;
   const passesAt = (dcVolts: number) =>
     passes(windowOfDrive({ ...drive, volts: { rfVolts, dcVolts } }, null, rodSet, lever.input));
   for (const resolution of resolutionsFrom(window.kind === "window" ? window : null, setMz)) {

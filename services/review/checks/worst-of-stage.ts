@@ -28,37 +28,42 @@ export function settingsAt(
 
 /**
  * One observation of a stage, the worst of its settings: one that fails, whatever the others lack; else all that is
- * missing; else the one nearest to its bound. It names the acquisition and the ion that decide.
+ * missing; else the one nearest to its bound. It names the acquisition and the ion that decide. What would make the
+ * stage pass has to bring all of its settings within the limit: `passesIf`, or what their own intervals share.
  */
 export function worstOfStage<Setting extends InStage>(
   about: About,
   settings: readonly Setting[],
   whyNone: string,
   read: (setting: Setting) => Reading,
+  passesIf?: () => PassesIf | null,
 ): Observation {
   const readings = settings.map((setting) => ({ setting, reading: read(setting) }));
   let worst: (typeof readings)[number] | null = null;
   for (const each of readings) {
     if (worst === null || closeness(each.reading) < closeness(worst.reading)) worst = each;
   }
-  const missing = [
-    ...new Set(readings.flatMap(({ reading }) => (reading.kind === "indeterminate" ? reading.missing : []))),
-  ];
+  const unknown = readings.flatMap(({ reading }) => (reading.kind === "indeterminate" ? [reading] : []));
+  const missing = [...new Set(unknown.flatMap((reading) => reading.missing))];
   const fails = worst !== null && outcomeOf(worst.reading) === "fail";
-  if (!fails && missing.length > 0) {
-    const first = readings.find(({ reading }) => reading.kind === "indeterminate")!;
-    return { ...about, kind: "indeterminate", missing, statement: first.reading.statement };
+  if (!fails && unknown.length > 0) {
+    return { ...about, kind: "indeterminate", missing, statement: unknown[0]!.statement };
   }
-  if (worst === null || worst.reading.kind === "not-applicable")
-    return { ...about, ...notApplicable(whyNone) };
+  if (worst === null) return { ...about, ...notApplicable(whyNone) };
   const { setting, reading } = worst;
-  const subject = { ...about.subject, acquisition: setting.acquisition.id, ion: setting.ion };
-  if (reading.kind !== "value" && reading.kind !== "impossible") return { ...about, ...reading };
+  if (reading.kind !== "value" && reading.kind !== "impossible")
+    return { ...about, ...notApplicable(whyNone) };
   return {
     ...about,
     ...reading,
-    subject,
-    passesIf: () => passesForAll(readings.map((each) => each.reading)),
+    subject: { ...about.subject, acquisition: setting.acquisition.id, ion: setting.ion },
+    passesIf:
+      unknown.length > 0
+        ? () => null
+        : (passesIf ?? (() => passesForAll(readings.map((each) => each.reading)))),
+    statement:
+      reading.statement +
+      (unknown.length > 0 ? ` Others cannot be judged without ${missing.join(", ")}.` : ""),
   };
 }
 

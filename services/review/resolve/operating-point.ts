@@ -1,8 +1,10 @@
 import { fieldOf, type RodSet } from "../../contract/rod-set.ts";
 import { Width, widthInMz } from "../../contract/width.ts";
 import { passbandOf } from "../../physics/passband.ts";
+import { RESOLUTION_MAXIMUM } from "../../physics/set-point.ts";
 import type { MassFilterStage } from "../instrument.ts";
 import { windowsBetweenPeaks } from "./measured-peaks.ts";
+import { NO_DC_OVER_RF, NO_VOLTS } from "./negligible.ts";
 import type { Placed } from "./resolved-method.ts";
 import { lineByLaw, lineThroughPoints, type SupplyLine } from "./supply-line.ts";
 import type { Window, WindowDrive } from "./window.ts";
@@ -105,12 +107,13 @@ export function windowOfDrive(
 ): Window {
   const { rfVolts, dcVolts } = drive.volts;
   const none = (reason: string): Window => ({ kind: "no-window", reason, evidence: "computed", drive });
-  if (rfVolts <= 0) return none("Without RF voltage nothing is selected.");
-  if (dcVolts <= 0)
+  if (rfVolts < NO_VOLTS) return none("Without RF voltage nothing is selected.");
+  if (dcVolts < NO_DC_OVER_RF * rfVolts)
     return none("Without DC of the right sign every ion above the cutoff passes and none is selected.");
   const answer = passbandOf(dcVolts, rfVolts, fieldOf(rodSet));
   if (answer.kind === "window") {
-    const { mzLow, mzHigh } = answer.passband;
+    const { mzLow, mzHigh, resolution } = answer.passband;
+    if (resolution! > RESOLUTION_MAXIMUM) return none("U/V is at the apex, where the window closes.");
     return {
       kind: "window",
       mzLow,

@@ -27,6 +27,7 @@ export function lineThroughPoints({ points }: Of<"drives">, pointer: string): Su
   const rf = rows.map(({ volts }) => volts.rfVolts);
   const dc = rows.map(({ volts }) => volts.dcVolts);
   const convention = conventionOf(points[0]!.drive);
+  const furtherPoint = `${pointer}/points/${points.length}`;
   const withoutDc = points.flatMap(({ drive }, index) =>
     drive.dc === undefined ? [`${pointer}/points/${index}/drive/dc`] : [],
   );
@@ -41,11 +42,18 @@ export function lineThroughPoints({ points }: Of<"drives">, pointer: string): Su
     if (rows.length === 1 && Math.abs(mz[0]! - setMz) > SAME_SETTING_MZ) {
       return {
         kind: "unknown",
-        missing: [`${pointer}/points/1`],
+        missing: [furtherPoint],
         reason: `The only drive point is not at m/z ${setMz}; a second point gives the line between them.`,
       };
     }
     const place = placeIn(mz, setMz, "extend");
+    if (valueAt(rf, place) < 0) {
+      return {
+        kind: "unknown",
+        missing: [furtherPoint],
+        reason: `The line through the drive points falls below 0 V before m/z ${setMz}; a point nearby is missing.`,
+      };
+    }
     return {
       kind: "drive",
       volts: { rfVolts: valueAt(rf, place), dcVolts: valueAt(dc, place) },
