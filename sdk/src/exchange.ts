@@ -109,7 +109,7 @@ function accepted(response: Response, text: string, mediaType: string): string {
 }
 
 /** The value that a JSON text holds, or undefined where it is none. */
-export function parsed(text: string): unknown {
+function parsed(text: string): unknown {
   try {
     return JSON.parse(text);
   } catch {
