@@ -2,9 +2,10 @@
  * Edges of the stable bands of one plane on a scan line a = 2 (U/V) q under a rectangular wave.
  *
  * On the line the equation is w'' + q W(ξ) w = 0 with W = 2 (U/V + level), an eigenvalue problem with q as eigenvalue and
- * an indefinite weight W. Each of the four boundary conditions of a half period has simple eigenvalues q₁ < q₂ < …, in
- * order of the zeros of their solutions (Ince, Ordinary Differential Equations, 1927, section 10.61 on positive q; Prüfer's
- * angle as in wave-rotation.ts). So a band is one interval of q or none, and counting quarter turns leaves no edge out.
+ * an indefinite weight W. Each of the four boundary conditions of a half period has simple positive eigenvalues, in order
+ * of the zeros of their solutions (oscillation theorems: Ince, Ordinary Differential Equations, 1927, chapter X, from
+ * memory; here Prüfer's angle of wave-rotation.ts). So a band is one interval of q or none, and counting quarter turns
+ * leaves no edge out.
  */
 import { bracketedZero } from "../regions/bracketed-zero.ts";
 import { meanLevel, type RectangularWave } from "./rectangular-wave.ts";

@@ -4,15 +4,18 @@ import { C, C_SLOPE, FIRST_K, FIRST_T, S, S_SLOPE, SECOND_K, SECOND_T } from "./
 export function zerosInHalfPeriod(solution: "C" | "S", half: Float64Array): number {
   const k1 = half[FIRST_K]!;
   const k2 = half[SECOND_K]!;
-  const phase1 = Math.sqrt(Math.abs(k1)) * half[FIRST_T]!;
-  const zerosFirst = k1 > 0 ? Math.floor(phase1 / Math.PI + (solution === "C" ? 0.5 : 0)) : 0;
+  const t1 = half[FIRST_T]!;
+  const t2 = half[SECOND_T]!;
   const endsPositive = half[solution === "C" ? C : S]! > 0;
-  if (k2 <= 0) {
-    // A solution that does not oscillate has one zero at most, and the sign at the end tells.
-    return (zerosFirst % 2 === 0) === endsPositive ? zerosFirst : zerosFirst + 1;
-  }
-  const entry = entryPhase(solution, k1, phase1, half[FIRST_T]!, Math.sqrt(k2));
-  const turns = (Math.sqrt(k2) * half[SECOND_T]! - entry) / Math.PI + 0.5;
+  // Thrown outwards by the upper level, a solution reaches its first zero after a quarter oscillation of the lower, its
+  // second after three quarters.
+  if (k1 <= 0 && k2 * t2 * t2 < Math.PI * Math.PI) return endsPositive ? 0 : 1;
+  const phase1 = Math.sqrt(Math.abs(k1)) * t1;
+  const zerosFirst = k1 > 0 ? Math.floor(phase1 / Math.PI + (solution === "C" ? 0.5 : 0)) : 0;
+  // A solution that does not oscillate has one zero at most, and the sign at the end tells.
+  if (k2 <= 0) return (zerosFirst % 2 === 0) === endsPositive ? zerosFirst : zerosFirst + 1;
+  const entry = entryPhase(solution, k1, phase1, t1, Math.sqrt(k2));
+  const turns = (Math.sqrt(k2) * t2 - entry) / Math.PI + 0.5;
   const zeros = zerosFirst + Math.floor(turns) - Math.floor(0.5 - entry / Math.PI);
   if ((zeros % 2 === 0) === endsPositive) return zeros;
   // A zero hard by the end: the sign there is right to the last digit, the phase is not.

@@ -40,7 +40,7 @@ test("volts at a fixed frequency, and the frequency at fixed volts, open the win
       },
     ),
   );
-  expectWithin(2e-14, deviations);
+  expectWithin(5e-15, deviations);
 });
 
 test("at fixed volts a quarter of the m/z needs twice the frequency, and nothing else changes", () => {

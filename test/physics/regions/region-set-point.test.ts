@@ -108,7 +108,7 @@ test("the volts of a set point open the window asked for, at any scale of m/z, r
       },
     ),
   );
-  expectWithin(1e-14, deviations);
+  expectWithin(5e-15, deviations);
 });
 
 test("set points of the first region are those of its own solver", () => {
