@@ -8,6 +8,7 @@ import { sealKeys } from "./endpoints/seal-keys.ts";
 import { setPoints } from "./endpoints/set-points.ts";
 import { signOff } from "./endpoints/sign-off.ts";
 import { signOffChecks } from "./endpoints/sign-off-checks.ts";
+import { signOffComparison } from "./endpoints/sign-off-comparison.ts";
 import { signOffVerification } from "./endpoints/sign-off-verification.ts";
 import { stability } from "./endpoints/stability.ts";
 import { transit } from "./endpoints/transit.ts";
@@ -22,6 +23,7 @@ export const ENDPOINTS: readonly AnyEndpoint[] = [
   setPoints,
   signOff,
   signOffVerification,
+  signOffComparison,
   signOffChecks,
   sealKeys,
   about,

@@ -16,6 +16,8 @@ export const OPERATIONS = {
   signOff: { method: "POST", path: "/v1/sign-off", takesBody: true },
   /** Whether a record still holds: unaltered, sealed, and the same found from the same input today: `POST /v1/sign-off/verification` */
   signOffVerification: { method: "POST", path: "/v1/sign-off/verification", takesBody: true },
+  /** What a transfer to another instrument, or a revision of method, instrument or criteria, changes: `POST /v1/sign-off/comparison` */
+  signOffComparison: { method: "POST", path: "/v1/sign-off/comparison", takesBody: true },
   /** Every check of a sign-off, with its default limits and their basis: `GET /v1/sign-off/checks` */
   signOffChecks: { method: "GET", path: "/v1/sign-off/checks", takesBody: false },
   /** The public keys of seals, the current one first: `GET /.well-known/jwks.json` */

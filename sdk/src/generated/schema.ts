@@ -160,6 +160,26 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/v1/sign-off/comparison": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * What a transfer to another instrument, or a revision of method, instrument or criteria, changes
+         * @description Signs off 2 to 10 cases and sets each against the first: one method on several instruments, or two revisions of a method, an instrument or criteria. Findings are matched by check, quantity, acquisition, ion and the place of the stage by its role, so that instruments may name their stages differently; those that are not the same come back with both sides. A setting carries over when neither edge of its window moves by more than the stated fraction of the width, or its cutoff by no more than that fraction of its distance from the ion. The acquisitions of all cases together count as the work. A JSON object that names a member twice is refused.
+         */
+        post: operations["signOffComparison"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/v1/sign-off/checks": {
         parameters: {
             query?: never;
@@ -399,6 +419,102 @@ export interface components {
             maxRadialEnergy_eVPerCharge?: number;
             /** @description Time in which ions of the last transition leave, in ms. */
             clearing_ms?: number;
+        };
+        /** @description A finding that is not the same in both cases. */
+        ComparedFinding: {
+            check: string;
+            quantity: string;
+            unit: string;
+            acquisition: string | null;
+            ion: string | null;
+            /** @description added and removed stand alone: the finding is there in one case only. */
+            changed: ("added" | "removed" | "outcome" | "value" | "limits" | "required")[];
+            /**
+             * @description By the outcomes, in the order pass, caution, indeterminate, fail.
+             * @enum {string}
+             */
+            direction: "better" | "worse" | "same" | "not-comparable";
+            base: components["schemas"]["ComparedFindingSide"] | null;
+            other: components["schemas"]["ComparedFindingSide"] | null;
+        };
+        /** @description The finding in one of both cases. */
+        ComparedFindingSide: {
+            /** @description JSON Pointer into the request of this case. */
+            pointer: string;
+            stage: string | null;
+            outcome: components["schemas"]["Outcome"];
+            required: boolean;
+            value: number | null;
+            pass: components["schemas"]["Bounds"];
+            statement: string;
+        };
+        /** @description A setting that does not carry over, or of which it cannot be told. */
+        ComparedSetting: {
+            acquisition: string;
+            ion: string;
+            /** @description null where it cannot be told. */
+            carriesOver: boolean | null;
+            /** @enum {string} */
+            reason: "window-moved" | "cutoff-moved" | "not-known" | "other-height" | "only-in-base" | "only-in-other";
+            /** @description By how much the edge that moved more did so, as a fraction of the width in the first case; of a cutoff, as a fraction of its distance from the ion. */
+            shiftOfWidth: number | null;
+            base: components["schemas"]["ComparedSettingSide"] | null;
+            other: components["schemas"]["ComparedSettingSide"] | null;
+        };
+        /** @description What the setting comes to in one of both cases. */
+        ComparedSettingSide: {
+            stage: string;
+            setMz: number;
+            window: {
+                mzLow: number;
+                mzHigh: number;
+                /**
+                 * @description At which height the width is taken: between the stability edges, at half or at a tenth of the peak's height. No default: the three differ.
+                 * @enum {string}
+                 */
+                at: "edges" | "half-height" | "tenth-height";
+            } | null;
+            cutoffMz: number | null;
+        };
+        ComparisonAnswer: {
+            base: components["schemas"]["ComparisonBase"];
+            others: components["schemas"]["ComparisonOther"][];
+            withinOfWidth: number;
+            /** @description Values that differ by less, relatively, are the same. */
+            tolerance: number;
+            engine: components["schemas"]["Engine"];
+        };
+        ComparisonBase: {
+            label: string;
+            verdict: components["schemas"]["Verdict"];
+            outcomeCounts: components["schemas"]["OutcomeCounts"];
+        };
+        /** @description A sign-off request with a name. */
+        ComparisonCase: {
+            /** @description What this case is called in the answer; each case another. */
+            label: string;
+            instrument: components["schemas"]["Instrument"];
+            method: components["schemas"]["Method"];
+            criteria?: components["schemas"]["Criteria"];
+        };
+        ComparisonOther: {
+            label: string;
+            verdict: components["schemas"]["Verdict"];
+            outcomeCounts: components["schemas"]["OutcomeCounts"];
+            /** @description What the change does, for a person. */
+            statement: string;
+            /** @description Which parts of the input are not those of the first case. */
+            inputChanged: ("instrument" | "method" | "criteria")[];
+            findings: components["schemas"]["ComparedFinding"][];
+            findingsUnchanged: number;
+            settings: components["schemas"]["ComparedSetting"][];
+            settingsCarriedOver: number;
+        };
+        ComparisonRequest: {
+            /** @description 2 to 10 cases; every other one is compared with the first. */
+            cases: components["schemas"]["ComparisonCase"][];
+            /** @description How far an edge of a window may move for the setting to carry over, as a fraction of the window's width; 0.1 when absent. */
+            withinOfWidth?: number;
         };
         Compound: {
             /** @description A name of the laboratory's own, no control characters. */
@@ -2538,6 +2654,100 @@ export interface operations {
                 };
             };
             /** @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where. */
+            422: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    signOffComparison: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** @description What a transfer to another instrument, or a revision of method, instrument or criteria, changes */
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ComparisonRequest"];
+            };
+        };
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ComparisonAnswer"];
+                };
+            };
+            /**
+             * @description `malformed-json`: The body is empty, is not well-formed JSON in UTF-8, or its top level is no object.
+             *
+             *     `interrupted-body`: The connection ended, or fewer bytes came than Content-Length announced.
+             */
+            400: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `body-too-large`: The body is larger than the limit that GET /v1/about shows. */
+            413: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `unsupported-media-type`: Content-Type is not application/json (with or without charset=utf-8), or the body is compressed. */
+            415: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /**
+             * @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where.
+             *
+             *     `too-much-work`: Each part is valid, but together they cost more than one request may.
+             */
             422: {
                 headers: {
                     "X-Request-Id": components["headers"]["RequestId"];
