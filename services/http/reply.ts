@@ -21,6 +21,11 @@ const SECURITY_HEADERS = {
   "Cache-Control": "no-store",
 } as const;
 
+/** A page may be styled by its own style element; all else stays shut. */
+const PAGE_POLICY = {
+  "Content-Security-Policy": "default-src 'none'; style-src 'unsafe-inline'; frame-ancestors 'none'",
+} as const;
+
 export function travelOf(response: Response): Travel {
   return response.locals as Travel;
 }
@@ -37,6 +42,7 @@ export function reply(
   travel.bytes = Buffer.byteLength(body);
   response.writeHead(status, {
     ...SECURITY_HEADERS,
+    ...(mediaType.startsWith("text/html") ? PAGE_POLICY : null),
     "X-Request-Id": travel.requestId,
     "Content-Type": mediaType,
     "Content-Length": travel.bytes,

@@ -70,7 +70,7 @@ ${table(
     boundsText(finding.pass, finding.unit),
     finding.passesIf === null
       ? "no single input would do"
-      : `${finding.passesIf.input} is ${boundsText(finding.passesIf, finding.passesIf.unit)}`,
+      : `${finding.passesIf.input} is ${boundsText(finding.passesIf, finding.passesIf.unit, String)}`,
   ]),
 )}
 </section>`;
@@ -164,13 +164,21 @@ function subjectText({ subject: { acquisition, stage, ion, pointer } }: Finding)
 }
 
 function valueText(value: number | null, unit: string): string {
-  return value === null ? "none" : digits(value, 5) + unitText(unit);
+  return value === null ? "none" : fiveDigits(value) + unitText(unit);
 }
 
-function boundsText({ min, max }: Bounds, unit: string): string {
-  if (min !== null && max !== null) return `${digits(min, 5)} to ${digits(max, 5)}${unitText(unit)}`;
-  if (min !== null) return `at least ${digits(min, 5)}${unitText(unit)}`;
-  return max === null ? "any" : `at most ${digits(max, 5)}${unitText(unit)}`;
+function boundsText(
+  { min, max }: Bounds,
+  unit: string,
+  write: (bound: number) => string = fiveDigits,
+): string {
+  if (min !== null && max !== null) return `${write(min)} to ${write(max)}${unitText(unit)}`;
+  if (min !== null) return `at least ${write(min)}${unitText(unit)}`;
+  return max === null ? "any" : `at most ${write(max)}${unitText(unit)}`;
+}
+
+function fiveDigits(value: number): string {
+  return digits(value, 5);
 }
 
 /** UCUM writes a dimensionless unit as 1 and puts ppm in brackets; a person does neither. */

@@ -14,7 +14,8 @@ dd { margin: 0; overflow-wrap: anywhere; }
 .verdict.caution { border-color: #b26a00; }
 .verdict.fail { border-color: #b3261e; }
 table { border-collapse: collapse; width: 100%; font-size: .88rem; }
-th, td { text-align: left; vertical-align: top; padding: .3rem .6rem .3rem 0; border-bottom: 1px solid #d8d8d8; overflow-wrap: anywhere; }
+th, td { text-align: left; vertical-align: top; padding: .3rem .6rem .3rem 0; border-bottom: 1px solid #d8d8d8; overflow-wrap: break-word; }
+th { white-space: nowrap; }
 thead { display: table-header-group; }
 tr, .signature { break-inside: avoid; }
 .signature div { display: grid; grid-template-columns: repeat(2, 1fr); gap: 1rem 2rem; }
