@@ -82,8 +82,11 @@ export function demandsOf(
   refineGrid(work, lead, 0, GRID);
   const tail = newRowList();
   if (!cutShort) refineGrid(work, tail, sharedEnd, Math.min(knownEnd, Math.ceil((rfCycles + 1) * GRID)));
-  keepWhatCounts(lead, shared, true);
-  keepWhatCounts(tail, shared, false);
+  if (rfCycles >= 1) {
+    // A shorter flight may be over before the cycle of entry is: then no row needs any other.
+    keepWhatCounts(lead, shared, true);
+    keepWhatCounts(tail, shared, false);
+  }
   return {
     rows,
     rfCycles,

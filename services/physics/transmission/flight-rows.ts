@@ -34,7 +34,7 @@ export interface FlightRows {
 }
 
 /** Rows this long leave nothing of any beam; the square of their square still fits a double. */
-export const LONGEST_ROW = 1e60;
+const LONGEST_ROW = 1e60;
 
 const state = new Float64Array(4);
 const values = new Float64Array(4);

@@ -20,7 +20,7 @@ export interface PeakQuery {
   /** Of transmissions, relative to the height of the peak; 1e-2..1e-5. */
   readonly accuracy: number;
   /** m/z per s (either sign) at which the set m/z moves during the flight; volts and m/z are those at entry. */
-  readonly scanRate_mzPerS?: number;
+  readonly scanRate?: number;
 }
 
 /** The two points of a peak at one height, in m/z. */
@@ -86,12 +86,12 @@ interface Values {
 function valuesOf(query: PeakQuery, mzCentre: number, phases: number, maxSteps: number): Values {
   const { dcVolts, rfVolts, field, beam } = query;
   const tolerances = { phases, slack: tolerancesOf(query.accuracy).slack };
-  const driveGrowth_perS = (query.scanRate_mzPerS ?? 0) / mzCentre;
+  const driveGrowth = (query.scanRate ?? 0) / mzCentre;
   const sum = { evaluations: 0, steps: 0, errorBound: 0 };
   let failure: Exclude<PeakAnswer, Peak> | null = null;
   const at = (mz: number): number => {
     if (failure !== null) return 0;
-    const flight = { mz, dcVolts, rfVolts, field, beam, rfCycles: query.residence(mz), driveGrowth_perS };
+    const flight = { mz, dcVolts, rfVolts, field, beam, rfCycles: query.residence(mz), driveGrowth };
     const answer = transmissionWithin(flight, tolerances, maxSteps - sum.steps);
     if (answer.kind === "outside-computed-domain") {
       failure = answer;
@@ -110,7 +110,7 @@ function valuesOf(query: PeakQuery, mzCentre: number, phases: number, maxSteps: 
 }
 
 /** Budget of a whole profile: some fifty transmissions. */
-export const DEFAULT_PROFILE_STEPS = 5 * DEFAULT_TRANSMISSION_STEPS;
+const DEFAULT_PROFILE_STEPS = 5 * DEFAULT_TRANSMISSION_STEPS;
 
 /**
  * Position, height and widths of the peak that a drive forms in the first stability region. The flanks are bracketed from

@@ -35,11 +35,11 @@ export interface Flight {
   readonly rfCycles: number;
   readonly beam: BeamMoments;
   /**
-   * Growth of U and V during the flight, relative and per second, of a field that is being scanned; volts are then those at
+   * Growth of U and V during the flight, relative, in 1/s, of a field that is being scanned; volts are then those at
    * entry. The ramp is counted from the middle of the RF cycle of entry, so a single start phase is off by at most half a cycle
    * of ramp and the mean is not. The motion in the growing field is solved as it is, without an average over cycles.
    */
-  readonly driveGrowth_perS?: number;
+  readonly driveGrowth?: number;
 }
 
 export interface Transmission {
@@ -111,7 +111,7 @@ function demandsOfPlane(
   const { mz, field, rfCycles } = flight;
   const a = sign * aOf(mz, flight.dcVolts, field);
   const q = sign * qOf(mz, flight.rfVolts, field);
-  const growthPerCycle = (flight.driveGrowth_perS ?? 0) / field.frequency;
+  const growthPerCycle = (flight.driveGrowth ?? 0) / field.frequency;
   const growth = 1 + Math.abs(growthPerCycle) * (rfCycles + 2);
   if (!((Math.abs(a) + 2 * Math.abs(q)) * growth <= LARGEST_PARAMETERS)) return null;
   const rows = flightRows({ a, q, growthPerCycle }, rfCycles);
@@ -147,9 +147,11 @@ export function transmissionWithin(
     return throughX * throughY;
   };
   const { mean, phases, errorBound } = phaseMean(product, tolerances.phases, MOST_PHASES, !growing);
-  if (steps > maxSteps || errorBound > tolerances.phases) return { kind: "not-converged", steps };
   const gaps = 4 * tolerances.slack * mean;
   const unfinished = x.cutShort || y.cutShort ? mean : 0;
+  if (steps > maxSteps || Math.max(errorBound, unfinished) > tolerances.phases) {
+    return { kind: "not-converged", steps };
+  }
   return {
     kind: "transmission",
     transmission: Math.min(1, mean),
