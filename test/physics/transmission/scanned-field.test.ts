@@ -47,7 +47,7 @@ test("a growth of nothing is the constant field, by two different ways through t
 
 /** x'' = −(1 + g (ξ/π − 1/2)) (a − 2q cos 2ξ) x by the classical fourth-order method, which shares nothing with the series. */
 function integrated(a: number, q: number, growth: number, turns: number, x0: number, v0: number): number {
-  const steps = 4000 * turns;
+  const steps = 8000 * turns;
   const h = (Math.PI * turns) / steps;
   const pull = (xi: number, x: number) =>
     -(1 + growth * (xi / Math.PI - 0.5)) * (a - 2 * q * Math.cos(2 * xi)) * x;
@@ -80,5 +80,5 @@ test("ions in a field that grows cycle by cycle move as a step-by-step integrati
       error: Math.abs(row[2]! - integrated(a, q, growthPerCycle, turns, 0, 1)),
     });
   }
-  expectWithin(1e-9, deviations);
+  expectWithin(2e-10, deviations);
 });
