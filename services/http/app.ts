@@ -19,7 +19,7 @@ export interface AppParts {
 }
 
 /** A service that was given no key seals nothing and knows no seal. */
-const NO_KEY: Sealing = { key: null, known: [], now: () => new Date() };
+const NO_KEY: Sealing = { key: null, known: [], host: null, now: () => new Date() };
 
 /** The service as an Express application. It holds no state between two requests. */
 export function createApp({
@@ -79,13 +79,13 @@ function entered({ operationId }: AnyEndpoint): RequestHandler {
 
 function question(endpoint: AnyEndpoint, limits: Limits, sealing: Sealing): RequestHandler {
   const vary = endpoint.forms === undefined ? undefined : { Vary: "Accept" };
-  // Answers are deterministic, so what depends on no request is written once.
+  // Answers are deterministic, so what depends on no request is written once. A POST may be sealed with its time.
   const written = new Map<string, WrittenAnswer>();
   return async (request, response) => {
     const form = formFor(endpoint, request);
     const answer =
       written.get(form) ?? write(endpoint, await answerOf(endpoint, request.body, limits, sealing), form);
-    if (endpoint.request === null) written.set(form, answer);
+    if (endpoint.method === "get") written.set(form, answer);
     reply(response, 200, answer.mediaType, answer.body, vary);
   };
 }

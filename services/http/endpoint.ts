@@ -1,6 +1,7 @@
 import type { z } from "zod";
 import type { Rule } from "../contract/rule.ts";
 import type { PublicSealKey, SealingKey } from "../review/record/seal-keys.ts";
+import type { Host } from "../review/self-check/self-check-schema.ts";
 import type { ProblemCode } from "./problems.ts";
 import type { Tag } from "./tags.ts";
 
@@ -11,12 +12,14 @@ export interface Limits {
   readonly bodyLimit_kB: number;
 }
 
-/** Keys and clock of the service: no answer may depend on them but in a seal. */
+/** Keys, clock and host of the service: no answer may depend on them but in a seal and in a self-check. */
 export interface Sealing {
   /** null where the service was given none; then nothing is sealed. */
   readonly key: SealingKey | null;
   /** Public keys whose seals are known: the current one first, then those of earlier generations. */
   readonly known: readonly PublicSealKey[];
+  /** null where the service was not told what it runs on. */
+  readonly host: Host | null;
   now(): Date;
 }
 

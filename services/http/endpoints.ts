@@ -5,6 +5,7 @@ import { passband } from "./endpoints/passband.ts";
 import { problems } from "./endpoints/problems.ts";
 import { rfOnly } from "./endpoints/rf-only.ts";
 import { sealKeys } from "./endpoints/seal-keys.ts";
+import { selfCheck } from "./endpoints/self-check.ts";
 import { setPoints } from "./endpoints/set-points.ts";
 import { signOff } from "./endpoints/sign-off.ts";
 import { signOffChecks } from "./endpoints/sign-off-checks.ts";
@@ -25,6 +26,7 @@ export const ENDPOINTS: readonly AnyEndpoint[] = [
   signOffVerification,
   signOffComparison,
   signOffChecks,
+  selfCheck,
   sealKeys,
   about,
   problems,

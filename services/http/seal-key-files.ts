@@ -1,7 +1,15 @@
 import { type FileHandle, open } from "node:fs/promises";
 import { readSealingKey, readTrustedKeys, SealKeyError } from "../review/record/seal-keys.ts";
+import type { Host } from "../review/self-check/self-check-schema.ts";
 import type { Sealing } from "./endpoint.ts";
 import { type Settings, SettingsError } from "./settings.ts";
+
+const HOST: Host = {
+  runtime: "Node.js",
+  version: process.version,
+  architecture: process.arch,
+  system: process.platform,
+};
 
 /** Stands in the settings for a file that was not given. */
 const NONE = "none";
@@ -45,7 +53,7 @@ export async function readSealing({
   if (complaints.length > 0) throw new SettingsError(complaints);
   const current = key === null ? [] : [key.published];
   const earlier = (trusted ?? []).filter(({ kid }) => kid !== key?.published.kid);
-  return { key, known: [...current, ...earlier], now: () => new Date() };
+  return { key, known: [...current, ...earlier], host: HOST, now: () => new Date() };
 }
 
 async function textOf(path: string, access: "private" | "public"): Promise<string> {

@@ -20,6 +20,8 @@ export const OPERATIONS = {
   signOffComparison: { method: "POST", path: "/v1/sign-off/comparison", takesBody: true },
   /** Every check of a sign-off, with its default limits and their basis: `GET /v1/sign-off/checks` */
   signOffChecks: { method: "GET", path: "/v1/sign-off/checks", takesBody: false },
+  /** Whether this installation computes as it should, against reference values from elsewhere: `POST /v1/self-check` */
+  selfCheck: { method: "POST", path: "/v1/self-check", takesBody: false },
   /** The public keys of seals, the current one first: `GET /.well-known/jwks.json` */
   sealKeys: { method: "GET", path: "/.well-known/jwks.json", takesBody: false },
   /** Version, edition of the constants, limits and cautions: `GET /v1/about` */

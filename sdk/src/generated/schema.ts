@@ -200,6 +200,26 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/v1/self-check": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Whether this installation computes as it should, against reference values from elsewhere
+         * @description Recomputes published and independently computed values on the machine that answers, and gives the worst deviation of each capability with its limit and source. With a key the answer is sealed and bears the time. It takes no body. `npm run qualify` writes the same as a dated sheet for the installation and operation file; it validates neither a method nor the laboratory's use of the service.
+         */
+        post: operations["selfCheck"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/.well-known/jwks.json": {
         parameters: {
             query?: never;
@@ -314,6 +334,24 @@ export interface components {
         Bounds: {
             min: number | null;
             max: number | null;
+        };
+        CapabilityChecked: {
+            capability: string;
+            /** @description Where the reference values come from. */
+            source: string;
+            /** @description How many values were recomputed. */
+            values: number;
+            /** @description null where a value did not come out at all. */
+            worstDeviation: number | null;
+            worstAt: string;
+            /**
+             * @description relative: over the reference. absolute: in the unit of the value. relative-above-1: over the reference where that is above 1, else absolute.
+             * @enum {string}
+             */
+            kind: "relative" | "absolute" | "relative-above-1";
+            limit: number;
+            /** @enum {string} */
+            outcome: "pass" | "fail";
         };
         Catalogue: {
             checks: components["schemas"]["CatalogueEntry"][];
@@ -792,6 +830,13 @@ export interface components {
                 a: number;
                 q: number;
             }[];
+        };
+        /** @description What runs the service; no names. */
+        Host: {
+            runtime: string;
+            version: string;
+            architecture: string;
+            system: string;
         };
         /** @description What is known of the instrument. Nothing about the rods need be known. */
         Instrument: {
@@ -1513,6 +1558,22 @@ export interface components {
             setMz?: number;
             /** @description Window that the method claims. */
             width?: components["schemas"]["Width"];
+        };
+        /** @description Shows that this installation computes as it should. It validates neither a method nor the laboratory's use of the service. */
+        SelfCheckAnswer: {
+            /**
+             * @description pass when every capability is within its limit.
+             * @enum {string}
+             */
+            outcome: "pass" | "fail";
+            capabilities: components["schemas"]["CapabilityChecked"][];
+            engine: components["schemas"]["Engine"];
+            /** @description null where the service was not told what it runs on. */
+            host: components["schemas"]["Host"] | null;
+            /** @description SHA-256 of the canonical JSON (RFC 8785) of the four members above. */
+            digest: string;
+            /** @description With the time of the check; null where the service holds no key. */
+            seal: components["schemas"]["Seal"] | null;
         };
         /** @description The laboratory's limits of set-mz. Distance of the set m/z from the m/z of the ion. */
         SetMzCriterion: {
@@ -2787,6 +2848,47 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["Catalogue"];
                     "text/markdown": string;
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    selfCheck: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SelfCheckAnswer"];
                 };
             };
             /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */

@@ -25,7 +25,12 @@ function serviceWith(...keys: readonly SealingKey[]) {
     endpoints: ENDPOINTS,
     openApiDocument: readOpenApiDocument(),
     limits: limitsOf({ bodyLimit_kB: 512 }),
-    sealing: { key: keys[0] ?? null, known: keys.map(({ published }) => published), now: () => new Date(AT) },
+    sealing: {
+      key: keys[0] ?? null,
+      known: keys.map(({ published }) => published),
+      host: null,
+      now: () => new Date(AT),
+    },
     logger: createLogger("silent"),
   });
   async function post(path: string, body: object) {
