@@ -1,8 +1,11 @@
+import { dcFromCanonical } from "../../contract/drive.ts";
 import { fieldOf, type RodSet } from "../../contract/rod-set.ts";
 import { Width, widthInMz } from "../../contract/width.ts";
+import { APEX_RATIO } from "../../physics/first-region.ts";
 import { passbandOf } from "../../physics/passband.ts";
 import { RESOLUTION_MAXIMUM } from "../../physics/set-point.ts";
 import type { MassFilterStage } from "../instrument.ts";
+import { digits } from "../statement.ts";
 import { windowsBetweenPeaks } from "./measured-peaks.ts";
 import { NO_DC_OVER_RF, NO_VOLTS } from "./negligible.ts";
 import type { Placed } from "./resolved-method.ts";
@@ -133,7 +136,9 @@ export function windowOfDrive(
       reason: `The edges were not found within ${answer.steps} steps.`,
     };
   }
+  const { between } = drive.convention.dc;
+  const opens = dcFromCanonical(APEX_RATIO * rfVolts, { between }) as { volts: number };
   return none(
-    `U/V is ${(dcVolts / rfVolts).toPrecision(7)}, above the apex of the stability region: no m/z passes.`,
+    `U/V is ${(dcVolts / rfVolts).toPrecision(7)}, above the apex of the stability region: no m/z passes. With this RF the window opens below ${digits(opens.volts, 7)} V DC, ${between}.`,
   );
 }
