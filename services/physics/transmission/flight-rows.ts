@@ -121,7 +121,7 @@ function advance(
 }
 
 /** Grid rows a cycle: a power of two, so that the extremes of the RF, ξ = 0 and π/2, are among them. */
-export const GRID = 16;
+export const GRID = 8;
 
 /** As rowAt for turn = index/GRID; a constant field needs no series for it. */
 export function gridRowAt(rows: FlightRows, index: number, out: Float64Array): void {

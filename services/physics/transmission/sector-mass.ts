@@ -31,23 +31,32 @@ function integrand(halfDistanceSquared: number, x: number): number {
   return (1 - Math.exp(-halfDistanceSquared * s)) / s;
 }
 
-/** The integral with x = sinh u: panels of at most one unit in u, eight nodes each. */
+const offsetCosh = new Float64Array(4);
+const offsetSinh = new Float64Array(4);
+
+/** The integral with x = sinh u: panels of at most one unit in u, eight nodes each, cosh u by its addition theorem. */
 function longSpan(halfDistanceSquared: number, t1: number, t2: number): number {
   const u1 = Math.asinh(t1);
   const u2 = Math.asinh(t2);
   const panels = Math.ceil(u2 - u1);
   const half = (u2 - u1) / (2 * panels);
+  for (let i = 0; i < 4; i++) {
+    offsetCosh[i] = Math.cosh(half * NODES_8[i]!);
+    offsetSinh[i] = Math.sinh(half * NODES_8[i]!);
+  }
   let sum = 0;
   for (let panel = 0; panel < panels; panel++) {
-    const middle = u1 + (2 * panel + 1) * half;
+    const growth = Math.exp(u1 + (2 * panel + 1) * half);
+    const cosh = 0.5 * (growth + 1 / growth);
+    const sinh = 0.5 * (growth - 1 / growth);
     for (let i = 0; i < 4; i++) {
-      const offset = half * NODES_8[i]!;
-      const below = Math.cosh(middle - offset);
-      const above = Math.cosh(middle + offset);
-      sum +=
-        WEIGHTS_8[i]! *
-        ((1 - Math.exp(-halfDistanceSquared * below * below)) / below +
-          (1 - Math.exp(-halfDistanceSquared * above * above)) / above);
+      const even = cosh * offsetCosh[i]!;
+      const odd = sinh * offsetSinh[i]!;
+      const above = even + odd;
+      const below = even - odd;
+      const valueBelow = (1 - Math.exp(-halfDistanceSquared * below * below)) / below;
+      const valueAbove = (1 - Math.exp(-halfDistanceSquared * above * above)) / above;
+      sum += WEIGHTS_8[i]! * (valueBelow + valueAbove);
     }
   }
   return half * sum;
@@ -75,8 +84,11 @@ export function sectorMasses(
     const scaleSquared = middle * middle + Math.max(inverse, 1);
     const spanSquared = half * half;
     if (spanSquared < TWO_NODE_SPAN * TWO_NODE_SPAN * scaleSquared) {
+      // Most sides end here; written out, because a call would allocate its doubles.
       const offset = half * NODE_2;
-      sum += half * (integrand(k, middle - offset) + integrand(k, middle + offset));
+      const s1 = 1 + (middle - offset) * (middle - offset);
+      const s2 = 1 + (middle + offset) * (middle + offset);
+      sum += half * ((1 - Math.exp(-k * s1)) / s1 + (1 - Math.exp(-k * s2)) / s2);
     } else if (spanSquared < THREE_NODE_SPAN * THREE_NODE_SPAN * scaleSquared) {
       const offset = half * NODE_3;
       const outer = integrand(k, middle - offset) + integrand(k, middle + offset);

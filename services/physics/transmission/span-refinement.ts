@@ -153,26 +153,31 @@ function settleChild(work: Refinement, list: RowList | null, depth: number): voi
   if (!isSettled(work, at, bulge, weakest)) halve(work, list, depth);
 }
 
+function loadGridRow(rows: FlightRows, index: number, at: number): void {
+  gridRowAt(rows, index, row);
+  stack[at] = index / GRID;
+  for (let i = 0; i < 4; i++) stack[at + 1 + i] = row[i]!;
+}
+
 /**
  * Settles the spans of the grid from index `from` to index `to`. With a list, the grid rows outside the hull and those that
  * are found between them are appended in order; without, the hull takes up what is found.
  */
 export function refineGrid(work: Refinement, list: RowList | null, from: number, to: number): void {
   const { rows, gridBulge, gridWeakest } = work;
-  gridRowAt(rows, from, row);
-  stack[TO] = from / GRID;
-  stack.set(row, TO + 1);
+  let loaded = -1;
   for (let index = from; index < to && work.steps <= work.maxSteps; index++) {
-    for (let i = 0; i < TO; i++) stack[i] = stack[TO + i]!;
-    if (list !== null && !isRowWithin(work, FROM, 1)) appendRow(list, stack, FROM, 1, 3);
-    gridRowAt(rows, index + 1, row);
-    stack[TO] = (index + 1) / GRID;
-    stack[TO + 1] = row[0]!;
-    stack[TO + 2] = row[1]!;
-    stack[TO + 3] = row[2]!;
-    stack[TO + 4] = row[3]!;
     const node = index % GRID;
-    if (!isSettled(work, FROM, gridBulge[node]!, gridWeakest[node]!)) halve(work, list, 0);
+    const bulge = gridBulge[node]!;
+    if (list === null && bulge <= 1 + work.slack) continue;
+    if (loaded === index) for (let i = 0; i < TO; i++) stack[i] = stack[TO + i]!;
+    else loadGridRow(rows, index, FROM);
+    if (list !== null && !isRowWithin(work, FROM, 1)) appendRow(list, stack, FROM, 1, 3);
+    loadGridRow(rows, index + 1, TO);
+    loaded = index + 1;
+    if (!isSettled(work, FROM, bulge, gridWeakest[node]!)) halve(work, list, 0);
   }
-  if (list !== null && !isRowWithin(work, TO, 1)) appendRow(list, stack, TO, TO + 1, TO + 3);
+  if (list === null) return;
+  loadGridRow(rows, to, TO);
+  if (!isRowWithin(work, TO, 1)) appendRow(list, stack, TO, TO + 1, TO + 3);
 }

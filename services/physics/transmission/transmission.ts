@@ -72,6 +72,8 @@ const ROUNDING_ERROR = 1e-8;
 
 /** Share of a tolerance that the phases may use; the spans between samples use a quarter. */
 const PHASE_SHARE = 0.7;
+/** A start phase whose x plane lets less than this share of the tolerance through counts nothing. */
+const NEGLIGIBLE_SHARE = 0.01;
 /** Four factors 1 + ε (two planes, two directions each) make up a quarter of the tolerance. */
 const SLACK_SHARE = 1 / 16;
 
@@ -139,11 +141,14 @@ export function transmissionWithin(
   if (x === null || y === null) return { kind: "outside-computed-domain", reason: "motion-too-violent" };
   const growing = x.rows.motion.growthPerCycle !== 0;
   let steps = x.steps + y.steps;
+  const negligible = NEGLIGIBLE_SHARE * tolerances.phases;
   const product = (turn: number): number => {
     if (steps > maxSteps) return 0;
     const throughX = planeTransmission(x, turn, sigmaX, sigmaVx);
+    steps += sidesOfLastPolygon();
+    if (throughX < negligible) return 0;
     const throughY = planeTransmission(y, turn, sigmaY, sigmaVy);
-    steps += sidesOfLastPolygon() + x.shared.count;
+    steps += sidesOfLastPolygon();
     return throughX * throughY;
   };
   const { mean, phases, errorBound } = phaseMean(product, tolerances.phases, MOST_PHASES, !growing);
@@ -157,7 +162,7 @@ export function transmissionWithin(
     transmission: Math.min(1, mean),
     phases,
     samplesPerCycle: Math.round(1 / Math.min(x.finestSpan, y.finestSpan)),
-    errorBound: errorBound + gaps + QUADRATURE_ERROR * mean + ROUNDING_ERROR + unfinished,
+    errorBound: errorBound + negligible + gaps + QUADRATURE_ERROR * mean + ROUNDING_ERROR + unfinished,
     steps,
   };
 }

@@ -117,8 +117,8 @@ test("lengths, frequency and mass scale out while a, q and the beam's shape stay
         };
         const one = passing({ ...flight, accuracy });
         const other = passing({ ...scaled, accuracy });
-        // Rounding of a and q moves T by its slope, R times 1e-16, and may move a decision of the refinement.
-        expect(Math.abs(one.transmission - other.transmission)).toBeLessThanOrEqual(1e-2 * accuracy);
+        // Rounding of a and q may turn a decision of the refinement, which has a quarter of the accuracy to itself.
+        expect(Math.abs(one.transmission - other.transmission)).toBeLessThanOrEqual(0.25 * accuracy);
       },
     ),
     runs,
