@@ -291,8 +291,12 @@ export interface components {
             /** @description Edition of the physical constants. */
             constants: string;
             limits: {
-                /** @description Largest request body in kB (1000 bytes). */
+                /** @description Largest request body in kB (1000 bytes), but for these two: */
                 body_kB: number;
+                /** @description Largest body of a sign-off or a comparison in kB. */
+                methodBody_kB: number;
+                /** @description Largest body of a verification in kB. */
+                recordBody_kB: number;
                 /** @description Most ions, points or targets in one request. */
                 itemsPerRequest: number;
                 /** @description Steps after which a solver answers not-converged. */

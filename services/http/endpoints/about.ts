@@ -3,7 +3,7 @@ import { CAUTIONS } from "../../contract/cautions.ts";
 import { CONSTANTS_EDITION } from "../../physics/constants.ts";
 import { DOMAIN_LIMIT } from "../../physics/stability.ts";
 import { defineEndpoint } from "../endpoint.ts";
-import { MOST_ITEMS } from "../limits.ts";
+import { METHOD_BODY_LIMIT_KB, MOST_ITEMS, RECORD_BODY_LIMIT_KB } from "../limits.ts";
 import { VERSION } from "../version.ts";
 
 const About = z
@@ -12,7 +12,9 @@ const About = z
     version: z.string().meta({ description: "The same version gives the same answer to the same request." }),
     constants: z.string().meta({ description: "Edition of the physical constants." }),
     limits: z.strictObject({
-      body_kB: z.int().meta({ description: "Largest request body in kB (1000 bytes)." }),
+      body_kB: z.int().meta({ description: "Largest request body in kB (1000 bytes), but for these two:" }),
+      methodBody_kB: z.int().meta({ description: "Largest body of a sign-off or a comparison in kB." }),
+      recordBody_kB: z.int().meta({ description: "Largest body of a verification in kB." }),
       itemsPerRequest: z.int().meta({ description: "Most ions, points or targets in one request." }),
       stepsPerSolution: z.int().meta({ description: "Steps after which a solver answers not-converged." }),
       mathieuParameters: z
@@ -41,7 +43,14 @@ export const about = defineEndpoint({
         service: "rodset",
         version: VERSION,
         constants: "CODATA 2022",
-        limits: { body_kB: 512, itemsPerRequest: 1000, stepsPerSolution: 200, mathieuParameters: 100 },
+        limits: {
+          body_kB: 512,
+          methodBody_kB: 4000,
+          recordBody_kB: 32_000,
+          itemsPerRequest: 1000,
+          stepsPerSolution: 200,
+          mathieuParameters: 100,
+        },
         cautions: [...CAUTIONS],
       },
     },
@@ -52,6 +61,8 @@ export const about = defineEndpoint({
     constants: CONSTANTS_EDITION,
     limits: {
       body_kB: bodyLimit_kB,
+      methodBody_kB: Math.max(bodyLimit_kB, METHOD_BODY_LIMIT_KB),
+      recordBody_kB: Math.max(bodyLimit_kB, RECORD_BODY_LIMIT_KB),
       itemsPerRequest: MOST_ITEMS,
       stepsPerSolution: maxSteps,
       mathieuParameters: DOMAIN_LIMIT,

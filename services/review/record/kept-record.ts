@@ -7,7 +7,7 @@ import type { ErrorItem } from "../../contract/rule.ts";
 export type KeptRecord = Readonly<Record<string, unknown>>;
 
 /** Objects and arrays inside each other; a record of this service needs nine. */
-export const DEEPEST = 40;
+const DEEPEST = 40;
 
 /** A record that is wrong in more places than these is wrong enough. */
 const MOST_ERRORS = 100;

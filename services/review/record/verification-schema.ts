@@ -22,7 +22,7 @@ const Shown = z.union([z.string(), z.number(), z.boolean(), z.null()]).meta({
   description: "A value; objects, arrays and long texts as the start of their JSON.",
 });
 
-export const RecordDifference = z
+const RecordDifference = z
   .strictObject({
     pointer: z.string().meta({
       description: "JSON Pointer into the record; /result/findings/- is a finding that is not on record.",
