@@ -101,7 +101,7 @@ describe("the sentence of an error", () => {
       "a long text, unquoted",
       z.strictObject({ label: Label }),
       { label: "s".repeat(201) },
-      "label is a text of length 201; it must be a text of 1 to 200 characters. A short text for people, 1 to 200 characters, no control characters.",
+      "label is a text of length 201; it must be a text of 1 to 200 characters. A short text for people, no control characters.",
     ],
     [
       "a long array",
