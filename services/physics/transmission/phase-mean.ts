@@ -22,7 +22,7 @@ const CROWDING = 0.1;
 const CROWDING_TWOFOLD = 0.75;
 
 const FEWEST_PHASES = 16;
-export const MOST_PHASES = 1024;
+export const MOST_PHASES = 4096;
 
 const values = new Float64Array(MOST_PHASES);
 

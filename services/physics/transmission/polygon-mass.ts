@@ -2,6 +2,9 @@ import { sectorMasses } from "./sector-mass.ts";
 import { stripMass } from "./strip-mass.ts";
 import type { SymmetricHull } from "./symmetric-hull.ts";
 
+/** A side that reaches this many of its distances is a side of a strip. */
+const STEEPEST = 1e100;
+
 let sideX = new Float64Array(256);
 let sideY = new Float64Array(256);
 let squares = new Float64Array(256);
@@ -68,13 +71,17 @@ export function polygonMass(hull: SymmetricHull, b11: number, b12: number, b21: 
     const nextX = i < sides ? sideX[i]! : -sideX[0]!;
     const nextY = i < sides ? sideY[i]! : -sideY[0]!;
     const area = vx * nextY - vy * nextX;
-    if (!(area > 0)) return stripMass(1 / Math.sqrt(longestSquare(sides)));
     const product = vx * nextX + vy * nextY;
     const nextSquare = nextX * nextX + nextY * nextY;
-    if (i > 0) ends[i - 1] = (square - product) / area;
+    const end = (square - product) / area;
+    const start = (product - nextSquare) / area;
+    if (!(area > 0 && Math.max(Math.abs(end), Math.abs(start)) < STEEPEST)) {
+      return stripMass(1 / Math.sqrt(longestSquare(sides)));
+    }
+    if (i > 0) ends[i - 1] = end;
     if (i < sides) {
       squares[i] = nextSquare;
-      starts[i] = (product - nextSquare) / area;
+      starts[i] = start;
     }
     vx = nextX;
     vy = nextY;

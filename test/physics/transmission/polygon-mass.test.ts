@@ -53,6 +53,13 @@ test("a beam without spread in one direction sees a strip", () => {
   expect(polygonMass(hull, 1.6, 0, 0, 0)).toBeCloseTo(stripMass(1 / 1.6), 14);
 });
 
+test("a spread of next to nothing is the limit of none, without overflow", () => {
+  const hull = hullOf([1, 0.3], [0.5, 2], [0.2, -0.7]);
+  for (const spread of [1e-12, 1e-100, 1e-200, 5e-324]) {
+    expect(polygonMass(hull, 1.6, 0, 0, spread)).toBeCloseTo(stripMass(1 / 1.6), 9);
+  }
+});
+
 test("a polygon of many sides has the mass of its circle, 1 − exp(−r²/2)", () => {
   const sides = 4000;
   const points = Array.from({ length: sides }, (_, i) => {
