@@ -26,11 +26,13 @@ export const ERROR_CODES = {
   "stages-do-not-fit": "The instrument lacks a stage that this kind of acquisition runs through.",
 
   "needs-two-pole-pairs": "The question is about a mass filter, which has two pole pairs.",
+  "member-not-taken": "The member means nothing beside another member of the request.",
   "dc-not-taken": "The question is about RF-only rods, and the drive states a DC.",
   "ion-trap-not-computed": "The formulas of a linear rod set do not hold in an ion trap.",
   "formula-not-computed": "This version does not compute m/z from a formula.",
-  "waveform-not-computed": "This version does not compute rectangular waves.",
-  "region-not-computed": "This version computes passbands of the first stability region only.",
+  "waveform-not-computed": "This version does not answer this question for rectangular waves.",
+  "region-not-computed":
+    "With a rectangular wave, this version computes set points of the first stability region only.",
 } as const satisfies Record<string, string>;
 
 export type ErrorCode = keyof typeof ERROR_CODES;

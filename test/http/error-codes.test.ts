@@ -10,6 +10,14 @@ const rf = { volts: 831.5, as: "zero-to-peak", between: "pole-and-ground" };
 const dc = { volts: 139.4, between: "pole-and-ground" };
 const ofIons = { given: "ions", rodSet, drive: { rf, dc }, ions: [{ mz: 500 }] };
 const transit = { rodSet, residence: { rfCycles: 200 }, ions: [{ mz: 500 }] };
+const setPoint = {
+  rodSet,
+  convention: {
+    rf: { as: "zero-to-peak", between: "pole-and-ground" },
+    dc: { between: "pole-and-ground" },
+  },
+  targets: [{ ion: { mz: 500 }, width: { value: 0.7, as: "mz", at: "edges" } }],
+};
 const rectangular = { shape: "rectangular", dutyCycle: 0.5, coupling: "dc" };
 
 /** The example of a sign-off with one member changed. */
@@ -115,6 +123,7 @@ const REQUESTS: Record<ErrorCode, [path: string, body: unknown, pointer: string]
     { rodSet: { ...rodSet, polePairs: 4 }, drive: { rf, dc } },
     "/rodSet/polePairs",
   ],
+  "member-not-taken": ["/v1/set-points", { ...setPoint, rf }, "/rf"],
   "dc-not-taken": ["/v1/rf-only", { rodSet, drive: { rf, dc }, ions: [{ mz: 500 }] }, "/drive/dc"],
   "ion-trap-not-computed": [
     "/v1/sign-off",
@@ -127,11 +136,15 @@ const REQUESTS: Record<ErrorCode, [path: string, body: unknown, pointer: string]
     "/ions/0/formula",
   ],
   "waveform-not-computed": [
-    "/v1/stability",
-    { given: "points", waveform: rectangular, points: [{ a: 0, q: 0.5 }] },
-    "/waveform",
+    "/v1/rf-only",
+    { rodSet: { ...rodSet, waveform: rectangular }, drive: { rf }, ions: [{ mz: 500 }] },
+    "/rodSet/waveform",
   ],
-  "region-not-computed": ["/v1/passband", { rodSet, drive: { rf, dc }, region: "third" }, "/region"],
+  "region-not-computed": [
+    "/v1/set-points",
+    { ...setPoint, rodSet: { ...rodSet, waveform: rectangular }, region: "third" },
+    "/region",
+  ],
 };
 
 describe("the registry of errors", () => {

@@ -23,7 +23,7 @@ export function testApp({ endpoints = ENDPOINTS, bodyLimit_kB = 512, level = "in
 const { app } = testApp({ level: "silent" });
 
 /** Asks with a document, or with the text of one that no object can stand for. */
-async function ask(path: string, body: unknown): Promise<Response> {
+export async function ask(path: string, body: unknown): Promise<Response> {
   return request(app)
     .post(path)
     .set("Content-Type", "application/json")

@@ -1,55 +1,23 @@
-import { z } from "zod";
-import { Drive, driveToCanonical } from "../../contract/drive.ts";
-import { Mz } from "../../contract/quantity.ts";
-import { fieldOf, RodSet, sinusoidalQuadrupole } from "../../contract/rod-set.ts";
+import { driveToCanonical } from "../../contract/drive.ts";
+import { fieldOf, quadrupole, rectangularWaveOf, waveShapeOf } from "../../contract/rod-set.ts";
 import { ppmFromRatio } from "../../contract/si.ts";
-import { Width, widthInMz } from "../../contract/width.ts";
+import { widthInMz } from "../../contract/width.ts";
 import { APEX_RATIO, apexMarginOf } from "../../physics/first-region.ts";
-import { passbandOf, windowInMz } from "../../physics/passband.ts";
+import { windowInMz } from "../../physics/passband.ts";
+import type { RectangularWave } from "../../physics/rectangular/rectangular-wave.ts";
+import { closingWave } from "../../physics/rectangular/wave-resolution.ts";
 import { ratioForResolution } from "../../physics/set-point.ts";
 import { defineEndpoint, type Limits } from "../endpoint.ts";
-import { firstRegionPassband, Passband } from "../shapes/passband.ts";
-import { firstRegionOnly, WantedRegion } from "../shapes/region.ts";
+import { answeredPassband, type Passband } from "../shapes/passband.ts";
+import {
+  PassbandAnswer,
+  type PassbandOfDrive,
+  type PassbandOfWidth,
+  PassbandRequest,
+} from "../shapes/passband-question.ts";
+import { type DrivenRods, passbandsOfDrive } from "../shapes/passbands-of-drive.ts";
+import type { WantedRegion } from "../shapes/region.ts";
 import { SOURCES } from "../shapes/sources.ts";
-
-const PassbandOfDrive = z
-  .strictObject({ rodSet: RodSet, drive: Drive, region: WantedRegion.optional() })
-  .meta({ id: "PassbandOfDrive", description: "What do these volts let through?" });
-
-const PassbandOfWidth = z.strictObject({ mzCentre: Mz, width: Width }).meta({
-  id: "PassbandOfWidth",
-  description: "What does such a window mean, with nothing known of the instrument?",
-});
-
-const PassbandRequest = z.union([PassbandOfDrive, PassbandOfWidth]).meta({ id: "PassbandRequest" });
-
-const PassbandAnswer = z
-  .strictObject({
-    passbands: z.array(Passband).meta({ description: "Empty when nothing passes; reason says why." }),
-    reason: z
-      .enum([
-        "above-apex",
-        "no-rf",
-        "width-height-needs-peak-profile",
-        "resolution-not-reachable",
-        "not-converged",
-      ])
-      .nullable()
-      .meta({
-        description:
-          "Why there is no passband. width-height-needs-peak-profile: the width is not taken at the edges, and this version cannot convert it.",
-      }),
-    dcToRfRatio: z
-      .number()
-      .nullable()
-      .meta({ description: "U/V, both pole-to-ground, V zero-to-peak; null without RF." }),
-    apexRatio: z.number().meta({ description: "U/V at which the first region closes." }),
-    apexMargin_ppm: z
-      .number()
-      .nullable()
-      .meta({ description: "How far U/V lies below the apex, in ppm of the apex; negative above it." }),
-  })
-  .meta({ id: "PassbandAnswer" });
 
 export const passband = defineEndpoint({
   operationId: "passband",
@@ -58,14 +26,9 @@ export const passband = defineEndpoint({
   tag: "Mass filter",
   summary: "The m/z that a mass filter lets through",
   description:
-    "Where the scan line a/q = 2U/V enters and leaves the first stability region, exactly. The edge at low m/z is β_x = 1 (light ions are lost to the x rods), the edge at high m/z is β_y = 0. Real peaks are narrower or wider than the distance of the edges, by residence and beam.",
+    "Where the scan line a/q = 2U/V enters and leaves a stability region, exactly: the first unless the request names another. There the edge at low m/z is β_x = 1 (light ions are lost to the x rods), the edge at high m/z β_y = 0. Rods may run a sinusoid or a rectangular wave; a DC-coupled rectangular wave filters by its duty cycle alone. Real peaks are narrower or wider than the distance of the edges, by residence and beam.",
   request: PassbandRequest,
-  rules: [
-    (request) =>
-      "rodSet" in request
-        ? [...sinusoidalQuadrupole(request.rodSet, "/rodSet"), ...firstRegionOnly(request)]
-        : [],
-  ],
+  rules: [(request) => ("rodSet" in request ? quadrupole(request.rodSet, "/rodSet") : [])],
   work: null,
   answer: PassbandAnswer,
   examples: {
@@ -83,6 +46,7 @@ export const passband = defineEndpoint({
         passbands: [
           {
             region: "first",
+            bands: { x: 0, y: 0 },
             mzLow: 1353.605792682864,
             mzHigh: 1367.2098687303862,
             mzCentre: 1360.407830706625,
@@ -92,6 +56,8 @@ export const passband = defineEndpoint({
             high: { a: 0.23326818806249455, q: 0.7001559121678081, lostTo: "y" },
           },
         ],
+        otherWindows: [],
+        searchedToQ: 12,
         reason: null,
         dcToRfRatio: 0.16658303101394553,
         apexRatio: 0.16784370570836984,
@@ -110,6 +76,8 @@ export const passband = defineEndpoint({
       },
       answer: {
         passbands: [],
+        otherWindows: [],
+        searchedToQ: 12,
         reason: "above-apex",
         dcToRfRatio: 0.16785,
         apexRatio: 0.16784370570836984,
@@ -127,6 +95,7 @@ export const passband = defineEndpoint({
         passbands: [
           {
             region: "first",
+            bands: { x: 0, y: 0 },
             mzLow: 137.1767286201643,
             mzHigh: 137.3139740961545,
             mzCentre: 137.2453513581594,
@@ -136,10 +105,86 @@ export const passband = defineEndpoint({
             high: { a: 0.23661899922013793, q: 0.70541007571007, lostTo: "y" },
           },
         ],
+        otherWindows: null,
+        searchedToQ: null,
         reason: null,
         dcToRfRatio: 0.16771733731046856,
         apexRatio: 0.16784370570836984,
         apexMargin_ppm: 752.8932787081121,
+      },
+    },
+    "duty-cycle-filter": {
+      summary: "A rectangular wave that filters by its duty cycle, without a DC supply",
+      source: SOURCES.rectangularWaves,
+      request: {
+        rodSet: {
+          fieldRadius_mm: 4,
+          frequency_MHz: 1,
+          waveform: { shape: "rectangular", dutyCycle: 0.605, coupling: "dc" },
+        },
+        drive: { rf: { volts: 421.78, as: "zero-to-peak", between: "pole-and-ground" } },
+      },
+      answer: {
+        passbands: [
+          {
+            region: "first",
+            bands: { x: 0, y: 0 },
+            mzLow: 432.1910633420424,
+            mzHigh: 470.3825495677101,
+            mzCentre: 451.28680645487646,
+            mzWidth: 38.19148622566818,
+            resolution: 11.816424314788,
+            low: { a: 0, q: 0.5962820935544725, lostTo: "x" },
+            high: { a: 0, q: 0.5478685216999752, lostTo: "y" },
+          },
+        ],
+        otherWindows: [],
+        searchedToQ: 12,
+        reason: null,
+        dcToRfRatio: 0,
+        apexRatio: 0.014280374858187641,
+        apexMargin_ppm: 1000000,
+      },
+    },
+    "rf-only-any-region": {
+      summary: "Without DC: all above the cutoff, and a second window near 0.12 of it",
+      source: SOURCES.rfOnly,
+      request: {
+        rodSet: { fieldRadius_mm: 3, frequency_MHz: 1 },
+        drive: { rf: { volts: 974.14, as: "zero-to-peak", between: "pole-and-ground" } },
+        region: "any",
+      },
+      answer: {
+        passbands: [
+          {
+            region: "first",
+            bands: { x: 0, y: 0 },
+            mzLow: 1165.2856764818714,
+            mzHigh: null,
+            mzCentre: null,
+            mzWidth: null,
+            resolution: null,
+            low: { a: 0, q: 0.9080463337345775, lostTo: "x" },
+            high: null,
+          },
+          {
+            region: "second",
+            bands: { x: 1, y: 1 },
+            mzLow: 139.60113594470002,
+            mzHigh: 140.82888839262088,
+            mzCentre: 140.21501216866045,
+            mzWidth: 1.2277524479208453,
+            resolution: 114.20462847059238,
+            low: { a: 0, q: 7.579690373736909, lostTo: "x" },
+            high: { a: 0, q: 7.513610299420813, lostTo: "y" },
+          },
+        ],
+        otherWindows: [],
+        searchedToQ: 12,
+        reason: null,
+        dcToRfRatio: 0,
+        apexRatio: 0.16784370570836984,
+        apexMargin_ppm: 1000000,
       },
     },
   },
@@ -147,47 +192,83 @@ export const passband = defineEndpoint({
     "rodSet" in request ? passbandOfDrive(request, limits) : passbandOfWidth(request, limits),
 });
 
-type Answer = z.input<typeof PassbandAnswer>;
-
-function passbandOfDrive({ rodSet, drive }: z.output<typeof PassbandOfDrive>, { maxSteps }: Limits): Answer {
-  const { dcVolts, rfVolts } = driveToCanonical(drive);
-  if (rfVolts === 0) return empty("no-rf", null);
-  const ratio = dcVolts / rfVolts;
-  const found = passbandOf(dcVolts, rfVolts, fieldOf(rodSet), maxSteps);
-  if (found.kind === "empty") return empty(found.reason, ratio);
-  if (found.kind === "not-converged") return empty("not-converged", ratio);
+function passbandOfDrive(
+  { rodSet, drive, region = "first" }: PassbandOfDrive,
+  { maxSteps }: Limits,
+): PassbandAnswer {
+  const { waveform } = rodSet;
+  const wave = rectangularWaveOf(waveform);
+  const volts = driveToCanonical(drive, waveShapeOf(waveform));
+  const rods = { volts, field: fieldOf(rodSet), wave };
+  const ratio = volts.rfVolts === 0 ? null : volts.dcVolts / volts.rfVolts;
+  const place = placeOnScanLine(ratio, wave, maxSteps);
+  if (ratio === null) return empty("no-rf", place);
+  const found = passbandsOfDrive(rods, region, maxSteps);
+  if (found.kind === "not-converged") return empty("not-converged", place);
+  const { passbands, searchedToQ } = found;
   return {
-    passbands: [firstRegionPassband(found.passband, ratio)],
-    reason: null,
-    ...placeOnScanLine(ratio, apexMarginOf(ratio)),
+    passbands: [...passbands],
+    otherWindows: region === "any" ? [] : otherWindowsOf(rods, passbands, maxSteps),
+    searchedToQ,
+    reason: passbands.length > 0 ? null : reasonOf(region, ratio, place.apexRatio),
+    ...place,
   };
 }
 
-function passbandOfWidth(
-  { mzCentre, width }: z.output<typeof PassbandOfWidth>,
-  { maxSteps }: Limits,
-): Answer {
-  if (width.at !== "edges") return empty("width-height-needs-peak-profile", null);
+/** The windows of all regions but those already found. */
+function otherWindowsOf(rods: DrivenRods, found: readonly Passband[], maxSteps: number): Passband[] | null {
+  const every = passbandsOfDrive(rods, "any", maxSteps);
+  if (every.kind === "not-converged") return null;
+  const isFound = ({ bands }: Passband) =>
+    found.some((one) => one.bands.x === bands.x && one.bands.y === bands.y);
+  return every.passbands.filter((window) => !isFound(window));
+}
+
+function reasonOf(region: WantedRegion, ratio: number, apexRatio: number | null): PassbandAnswer["reason"] {
+  if (region !== "first") return "scan-line-misses-region";
+  return apexRatio !== null && ratio < apexRatio ? "below-lower-apex" : "above-apex";
+}
+
+function passbandOfWidth({ mzCentre, width }: PassbandOfWidth, { maxSteps }: Limits): PassbandAnswer {
+  const nowhere = placeOnScanLine(null, null, maxSteps);
+  if (width.at !== "edges") return empty("width-height-needs-peak-profile", nowhere);
   const solved = ratioForResolution(mzCentre / widthInMz(width, mzCentre), maxSteps);
-  if (solved.kind === "not-reachable") return empty(solved.reason, null);
-  if (solved.kind === "not-converged") return empty("not-converged", null);
+  if (solved.kind === "not-reachable") return empty(solved.reason, nowhere);
+  if (solved.kind === "not-converged") return empty("not-converged", nowhere);
   const { ratio, margin, qLow, qHigh } = solved;
   const mzTimesQ = (2 * mzCentre * qLow * qHigh) / (qLow + qHigh);
+  const window = {
+    bands: { x: 0, y: 0 },
+    passband: windowInMz({ ...solved, kind: "window" }, mzTimesQ),
+    lostBeyond: { low: "x", high: "y" },
+  } as const;
   return {
-    passbands: [firstRegionPassband(windowInMz({ ...solved, kind: "window" }, mzTimesQ), ratio)],
+    passbands: [answeredPassband(window, ratio)],
+    otherWindows: null,
+    searchedToQ: null,
     reason: null,
-    ...placeOnScanLine(ratio, margin),
-  };
-}
-
-function empty(reason: Answer["reason"], ratio: number | null): Answer {
-  return { passbands: [], reason, ...placeOnScanLine(ratio, ratio === null ? null : apexMarginOf(ratio)) };
-}
-
-function placeOnScanLine(ratio: number | null, margin: number | null) {
-  return {
     dcToRfRatio: ratio,
     apexRatio: APEX_RATIO,
-    apexMargin_ppm: margin === null ? null : ppmFromRatio(margin),
+    apexMargin_ppm: ppmFromRatio(margin),
   };
+}
+
+type Place = Pick<PassbandAnswer, "dcToRfRatio" | "apexRatio" | "apexMargin_ppm">;
+
+function empty(reason: PassbandAnswer["reason"], place: Place): PassbandAnswer {
+  return { passbands: [], otherWindows: null, searchedToQ: null, reason, ...place };
+}
+
+function placeOnScanLine(ratio: number | null, wave: RectangularWave | null, maxSteps: number): Place {
+  const apexRatio = wave === null ? APEX_RATIO : apexRatioOf(wave, maxSteps);
+  if (ratio === null || apexRatio === null || apexRatio <= 0) {
+    return { dcToRfRatio: ratio, apexRatio, apexMargin_ppm: null };
+  }
+  const margin = wave === null ? apexMarginOf(ratio) : (apexRatio - ratio) / apexRatio;
+  return { dcToRfRatio: ratio, apexRatio, apexMargin_ppm: ppmFromRatio(margin) };
+}
+
+function apexRatioOf(wave: RectangularWave, maxSteps: number): number | null {
+  const closed = closingWave({ vary: "ratio", wave, towards: "high" }, maxSteps);
+  return closed.kind === "closed" ? closed.ratio : null;
 }

@@ -1,69 +1,16 @@
-import { z } from "zod";
-import { Drive, driveToCanonical } from "../../contract/drive.ts";
+import { driveToCanonical } from "../../contract/drive.ts";
 import { mzOfIon } from "../../contract/ion.ts";
-import { MathieuA, MathieuQ } from "../../contract/quantity.ts";
-import { fieldOf, RodSet, sinusoid, sinusoidalQuadrupole, Waveform } from "../../contract/rod-set.ts";
+import { fieldOf, quadrupole, rectangularWaveOf, waveShapeOf } from "../../contract/rod-set.ts";
 import { aOf, qOf } from "../../physics/mathieu-parameters.ts";
+import type { RectangularWave } from "../../physics/rectangular/rectangular-wave.ts";
+import { pointStabilityRectangular } from "../../physics/rectangular/wave-stability.ts";
 import { DOMAIN_LIMIT, type PlaneStability, pointStability } from "../../physics/stability.ts";
 import { defineEndpoint } from "../endpoint.ts";
 import { MOST_ITEMS } from "../limits.ts";
-import { Ions, ionsErrors } from "../shapes/ions.ts";
-import { RegionName, regionNameOf } from "../shapes/region.ts";
+import { ionsErrors } from "../shapes/ions.ts";
+import { regionOf } from "../shapes/region.ts";
 import { SOURCES } from "../shapes/sources.ts";
-
-const StabilityRequest = z
-  .discriminatedUnion("given", [
-    z
-      .strictObject({ given: z.literal("ions"), rodSet: RodSet, drive: Drive, ions: Ions })
-      .meta({ id: "StabilityOfIons" }),
-    z
-      .strictObject({
-        given: z.literal("points"),
-        waveform: Waveform.optional(),
-        points: z
-          .array(z.strictObject({ a: MathieuA, q: MathieuQ }))
-          .min(1)
-          .max(MOST_ITEMS)
-          .meta({ description: `1 to ${MOST_ITEMS} points; the results come back in the same order.` }),
-      })
-      .meta({ id: "StabilityOfPoints" }),
-  ])
-  .meta({ id: "StabilityRequest" });
-
-const Plane = z
-  .strictObject({
-    stable: z.boolean().nullable(),
-    band: z.int().nullable().meta({ description: "The stable band n, between a_n(q) and b_{n+1}(q)." }),
-    characteristicExponent: z
-      .number()
-      .nullable()
-      .meta({ description: "Total characteristic exponent β, between n and n + 1 in band n." }),
-    halfTrace: z
-      .number()
-      .nullable()
-      .meta({ description: "Half the trace over one RF period, cos πβ where the motion is stable." }),
-  })
-  .meta({ id: "PlaneStability", description: "Motion in one plane; all null outside the computed domain." });
-
-const StabilityResult = z
-  .strictObject({
-    mz: z.number().nullable().meta({ description: "null for a point." }),
-    a: z.number(),
-    q: z.number(),
-    stable: z.boolean().nullable(),
-    reason: z.enum(["outside-computed-domain"]).nullable(),
-    region: z.strictObject({ x: z.int(), y: z.int(), name: RegionName.nullable() }).nullable().meta({
-      description: "The bands n_x and n_y of a stable ion, and the name of the region if it has one.",
-    }),
-    lostTo: z.enum(["x", "y", "both"]).nullable().meta({
-      description: "The rods that take an unstable ion; x are those whose DC has the sign of the ion.",
-    }),
-    x: Plane,
-    y: Plane,
-  })
-  .meta({ id: "StabilityResult" });
-
-const StabilityAnswer = z.strictObject({ results: z.array(StabilityResult) }).meta({ id: "StabilityAnswer" });
+import { StabilityAnswer, StabilityRequest, type StabilityResult } from "../shapes/stability.ts";
 
 export const stability = defineEndpoint({
   operationId: "stability",
@@ -71,13 +18,11 @@ export const stability = defineEndpoint({
   path: "/v1/stability",
   tag: "Ion motion",
   summary: "Whether ions or points (a, q) are stable, and which rods take them if not",
-  description: `Solves the Mathieu equation in both planes. a and q belong to x, −a and −q to y. Beyond |a| or q of ${DOMAIN_LIMIT} nothing is computed and reason says so. Stable means bounded for ever in an ideal field, not that the ion fits between the rods.`,
+  description: `Solves the Mathieu equation in both planes, or with a rectangular wave the Meissner equation, in which V is half the swing of the wave and a only the DC besides it. a and q belong to x, −a and −q to y. Beyond |a| or q of ${DOMAIN_LIMIT}, under a rectangular wave also where rounding would show before, nothing is computed and reason says so. Stable means bounded for ever in an ideal field, not that the ion fits between the rods.`,
   request: StabilityRequest,
   rules: [
     (request) =>
-      request.given === "ions"
-        ? [...sinusoidalQuadrupole(request.rodSet, "/rodSet"), ...ionsErrors(request)]
-        : sinusoid(request.waveform, "/waveform"),
+      request.given === "ions" ? [...quadrupole(request.rodSet, "/rodSet"), ...ionsErrors(request)] : [],
   ],
   work: {
     unit: "ions or points",
@@ -235,17 +180,72 @@ export const stability = defineEndpoint({
         ],
       },
     },
+    "duty-cycle-0.61": {
+      summary: "A rectangular wave without DC: inside its window, and an ion too heavy for it",
+      request: {
+        given: "points",
+        waveform: { shape: "rectangular", dutyCycle: 0.61, coupling: "dc" },
+        points: [
+          { a: 0, q: 0.585 },
+          { a: 0, q: 0.57 },
+        ],
+      },
+      answer: {
+        results: [
+          {
+            mz: null,
+            a: 0,
+            q: 0.585,
+            stable: true,
+            reason: null,
+            region: { x: 0, y: 0, name: "first" },
+            lostTo: null,
+            x: {
+              stable: true,
+              band: 0,
+              characteristicExponent: 0.921134133273525,
+              halfTrace: -0.9694630895243626,
+            },
+            y: {
+              stable: true,
+              band: 0,
+              characteristicExponent: 0.06189003267822242,
+              halfTrace: 0.9811573249192571,
+            },
+          },
+          {
+            mz: null,
+            a: 0,
+            q: 0.57,
+            stable: false,
+            reason: null,
+            region: null,
+            lostTo: "y",
+            x: {
+              stable: true,
+              band: 0,
+              characteristicExponent: 0.8626476150483972,
+              halfTrace: -0.9083372280910262,
+            },
+            y: { stable: false, band: null, characteristicExponent: null, halfTrace: 1.021187170130438 },
+          },
+        ],
+      },
+    },
   },
   handler(request) {
     if (request.given === "points") {
-      return { results: request.points.map(({ a, q }) => resultAt(null, a, q)) };
+      const wave = rectangularWaveOf(request.waveform);
+      return { results: request.points.map(({ a, q }) => resultAt(null, a, q, wave)) };
     }
-    const field = fieldOf(request.rodSet);
-    const { dcVolts, rfVolts } = driveToCanonical(request.drive);
+    const { rodSet } = request;
+    const field = fieldOf(rodSet);
+    const wave = rectangularWaveOf(rodSet.waveform);
+    const { dcVolts, rfVolts } = driveToCanonical(request.drive, waveShapeOf(rodSet.waveform));
     return {
       results: request.ions.map((ion) => {
         const mz = mzOfIon(ion);
-        return resultAt(mz, aOf(mz, dcVolts, field), qOf(mz, rfVolts, field));
+        return resultAt(mz, aOf(mz, dcVolts, field), qOf(mz, rfVolts, field), wave);
       }),
     };
   },
@@ -253,8 +253,8 @@ export const stability = defineEndpoint({
 
 const NOTHING_COMPUTED = { stable: null, band: null, characteristicExponent: null, halfTrace: null };
 
-function resultAt(mz: number | null, a: number, q: number): z.input<typeof StabilityResult> {
-  const found = pointStability(a, q);
+function resultAt(mz: number | null, a: number, q: number, wave: RectangularWave | null): StabilityResult {
+  const found = wave === null ? pointStability(a, q) : pointStabilityRectangular(a, q, wave);
   if (found === null) {
     return {
       mz,
@@ -275,13 +275,13 @@ function resultAt(mz: number | null, a: number, q: number): z.input<typeof Stabi
     q,
     stable,
     reason: null,
-    region: region && { ...region, name: regionNameOf(region) },
+    region: region && regionOf(region),
     lostTo,
     x: planeOf(x),
     y: planeOf(y),
   };
 }
 
-function planeOf({ stable, band, characteristicExponent, halfTrace }: PlaneStability): z.input<typeof Plane> {
+function planeOf({ stable, band, characteristicExponent, halfTrace }: PlaneStability): StabilityResult["x"] {
   return { stable, band, characteristicExponent, halfTrace };
 }

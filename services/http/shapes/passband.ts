@@ -1,23 +1,29 @@
 import { z } from "zod";
 import type { Passband as ComputedPassband } from "../../physics/passband.ts";
+import { type Bands, regionNameOf } from "../../physics/regions/stability-regions.ts";
 import { RegionName } from "./region.ts";
 
 const PassbandEdge = z
   .strictObject({
     a: z.number(),
     q: z.number(),
-    lostTo: z
-      .enum(["x", "y"])
-      .meta({ description: "The rods that take an ion just outside this edge: light ions x, heavy ions y." }),
+    lostTo: z.enum(["x", "y"]).nullable().meta({
+      description:
+        "The rods that take an ion just outside this edge; in the first region light ions x, heavy ones y. null where the window goes on beyond this q, but no edge is sought there.",
+    }),
   })
   .meta({ id: "PassbandEdge", description: "Where the scan line leaves the region." });
 
 export const Passband = z
   .strictObject({
-    region: RegionName,
+    region: RegionName.nullable().meta({ description: "null for a region without a name: see bands." }),
+    bands: z
+      .strictObject({ x: z.int(), y: z.int() })
+      .meta({ description: "The bands n_x and n_y of the region." }),
     mzLow: z.number().meta({ description: "m/z of the edge below which ions are lost." }),
     mzHigh: z.number().nullable().meta({
-      description: "m/z of the edge above which ions are lost; null when there is no DC, so no upper edge.",
+      description:
+        "m/z of the edge above which ions are lost; null where the field has no mean, so that there is no upper edge.",
     }),
     mzCentre: z.number().nullable().meta({ description: "Half-way between both edges in m/z." }),
     mzWidth: z.number().nullable().meta({ description: "Distance of both edges in m/z." }),
@@ -31,17 +37,27 @@ export const Passband = z
   });
 export type Passband = z.output<typeof Passband>;
 
-/** A computed passband of the first region on the scan line a = 2 (U/V) q. */
-export function firstRegionPassband(computed: ComputedPassband, dcToRfRatio: number): Passband {
-  const { mzLow, mzHigh, mzCentre, mzWidth, resolution, qLow, qHigh } = computed;
+/** A window as physics finds it, and the rods that take an ion beyond its ends at low and at high m/z. */
+export interface ComputedWindow {
+  readonly bands: Bands;
+  readonly passband: ComputedPassband;
+  readonly lostBeyond: { readonly low: "x" | "y" | null; readonly high: "x" | "y" | null };
+}
+
+/** A computed window on the scan line a = 2 (U/V) q. */
+export function answeredPassband(window: ComputedWindow, dcToRfRatio: number): Passband {
+  const { bands, passband, lostBeyond } = window;
+  const { mzLow, mzHigh, mzCentre, mzWidth, resolution, qLow, qHigh } = passband;
+  const edge = (q: number, lostTo: "x" | "y" | null) => ({ a: 2 * dcToRfRatio * q, q, lostTo });
   return {
-    region: "first",
+    region: regionNameOf(bands),
+    bands: { x: bands.x, y: bands.y },
     mzLow,
     mzHigh,
     mzCentre,
     mzWidth,
     resolution,
-    low: { a: 2 * dcToRfRatio * qHigh, q: qHigh, lostTo: "x" },
-    high: qLow === null ? null : { a: 2 * dcToRfRatio * qLow, q: qLow, lostTo: "y" },
+    low: edge(qHigh, lostBeyond.low),
+    high: qLow === null ? null : edge(qLow, lostBeyond.high),
   };
 }

@@ -1,7 +1,16 @@
 import { describe, expect, it } from "vitest";
+import {
+  DUTY_CYCLE_FILTERS,
+  DUTY_CYCLE_WINDOWS,
+  RECTANGULAR_WAVES,
+  SQUARE_WAVE_APEX,
+  SQUARE_WAVE_CUTOFF,
+} from "../../reference/rectangular-waves.ts";
+import { RF_ONLY } from "../../reference/tables.ts";
+import { SECOND_REGION } from "../../reference/worked-examples.ts";
 import { expectClose } from "../close-to.ts";
 import { answerTo, errorsOf } from "../test-app.ts";
-import { drive, otherStatementsOf, rodSet } from "./requests.ts";
+import { drive, otherStatementsOf, rodSet, wave } from "./requests.ts";
 
 const PATH = "/v1/passband";
 
@@ -63,18 +72,146 @@ describe("POST /v1/passband of a drive", () => {
   });
 
   it.each([
-    [{ rodSet: rodSet(4, 1), drive: drive(1), region: "second" }, [["/region", "region-not-computed"]]],
     [
       { rodSet: rodSet(4, 1, { polePairs: 4 }), drive: drive(1), region: "any" },
-      [
-        ["/rodSet/polePairs", "needs-two-pole-pairs"],
-        ["/region", "region-not-computed"],
-      ],
+      [["/rodSet/polePairs", "needs-two-pole-pairs"]],
+    ],
+    [
+      { rodSet: rodSet(4, 1, { waveform: wave(1) }), drive: drive(1) },
+      [["/rodSet/waveform/dutyCycle", "out-of-range"]],
     ],
     [{ rodSet: rodSet(4, 1), drive: drive(1), region: "fourth" }, [["/region", "not-one-of"]]],
     [{ rodSet: rodSet(4, 1) }, [["/drive", "missing-member"]]],
   ])("refuses %j", async (body, expected) => {
     expect(await errorsOf(PATH, body)).toEqual(expected);
+  });
+});
+
+describe("POST /v1/passband in other regions", () => {
+  it("names the second window that the same volts open, near 0.12 of the cutoff", async () => {
+    // Independent computation at 50 digits (test/reference, rods without DC).
+    for (const [r0, f, V, cutoff, secondHigh, secondLow] of RF_ONLY.quadrupole) {
+      const asked = { rodSet: rodSet(r0 * 1e3, f / 1e6), drive: drive(V) };
+      const { passbands, otherWindows } = await answerTo(PATH, asked);
+      expect([passbands.length, otherWindows.length]).toEqual([1, 1]);
+      const [second] = otherWindows;
+      expect(second).toMatchObject({ region: "second", bands: { x: 1, y: 1 } });
+      expectClose([passbands[0].mzLow, second.mzLow, second.mzHigh], [cutoff, secondLow, secondHigh], 1e-12);
+      expect(second.mzCentre / cutoff).toBeCloseTo(0.12, 2);
+      // Dawson and Bingqi 1984, recomputed: q 7.51361..7.57970, R 114.
+      expect(second.high.q).toBeCloseTo(SECOND_REGION.qLow, 5);
+      expect(second.resolution).toBeCloseTo(SECOND_REGION.resolution, 0);
+    }
+  });
+
+  it("answers the region named, or all of them, without naming a window twice", async () => {
+    const asked = { rodSet: rodSet(3, 1), drive: drive(974.14) };
+    const every = await answerTo(PATH, { ...asked, region: "any" });
+    expect(every.passbands.map(({ region }: { region: string }) => region)).toEqual(["first", "second"]);
+    expect(every.otherWindows).toEqual([]);
+    const second = await answerTo(PATH, { ...asked, region: "second" });
+    expect(second.passbands).toEqual([every.passbands[1]]);
+    expect(second.otherWindows).toEqual([every.passbands[0]]);
+  });
+
+  it("finds the third region between its corners in U/V, and no other window beside it", async () => {
+    // Corners (a, q) of Du, Olney and Douglas 1997, recomputed: U/V 0.447731 and 0.489212.
+    for (const [ratio, isOpen] of [
+      [0.4477, false],
+      [0.4478, true],
+      [0.4892, true],
+      [0.4893, false],
+    ] as const) {
+      const asked = { rodSet: rodSet(4, 1.2), drive: drive(1000, 1000 * ratio), region: "third" };
+      const { passbands, otherWindows, reason, searchedToQ } = await answerTo(PATH, asked);
+      expect(passbands).toHaveLength(isOpen ? 1 : 0);
+      expect(reason).toBe(isOpen ? null : "scan-line-misses-region");
+      expect(otherWindows).toEqual([]);
+      // Beyond q 12, or a 12, further regions are not listed.
+      expect(searchedToQ).toBe(12);
+      if (isOpen) expect(passbands[0]).toMatchObject({ region: "third", bands: { x: 1, y: 0 } });
+    }
+  });
+});
+
+describe("POST /v1/passband of a rectangular wave", () => {
+  it.each(DUTY_CYCLE_FILTERS)("filters by its duty cycle alone: $duty", async (row) => {
+    // 50-digit matrix products (test/reference, rectangular waves among the passbands).
+    const { passbands, reason, apexRatio } = await answerTo(PATH, {
+      rodSet: rodSet(row.r0_m * 1e3, row.f_Hz / 1e6, { waveform: wave(row.duty) }),
+      drive: drive(row.V_V),
+    });
+    expect(passbands).toHaveLength(row.stable ? 1 : 0);
+    expect(reason).toBe(row.stable ? null : "above-apex");
+    expect(apexRatio > 0).toBe(row.stable);
+    if (!row.stable) return;
+    expectClose(passbands[0].mzLow, row.mz_low, 1e-14);
+    if (row.mz_high === null) expect(passbands[0].high).toBeNull();
+    else expectClose(passbands[0].mzHigh, row.mz_high, 1e-14);
+    expect(passbands[0].low.lostTo).toBe("x");
+  });
+
+  it.each(DUTY_CYCLE_WINDOWS)("passes the q of the handbooks at duty cycle $dutyCycle", async (row) => {
+    const asked = { rodSet: rodSet(4, 1, { waveform: wave(row.dutyCycle) }), drive: drive(500) };
+    const [{ low, high }] = (await answerTo(PATH, asked)).passbands;
+    expect(low.q).toBeCloseTo(row.qHigh, 4);
+    expect(high.q).toBeCloseTo(row.qLow, 4);
+    // Through a capacitor the mean is gone, and with it the upper edge.
+    const throughCapacitor = rodSet(4, 1, { waveform: wave(row.dutyCycle, "ac") });
+    const coupled = await answerTo(PATH, { rodSet: throughCapacitor, drive: drive(500) });
+    expect(coupled.passbands[0].high).toBeNull();
+  });
+
+  it("has the cutoff and the apex of the square wave", async () => {
+    const square = rodSet(4, 1, { waveform: wave(0.5) });
+    const answer = await answerTo(PATH, { rodSet: square, drive: drive(500) });
+    expectClose(answer.passbands[0].low.q, SQUARE_WAVE_CUTOFF, 1e-14);
+    // Konenkov, Sudakov and Douglas 2002, recomputed.
+    expect(answer.apexRatio).toBeCloseTo(SQUARE_WAVE_APEX.ratio, 6);
+    expect(answer.otherWindows).toMatchObject([{ region: "second" }]);
+    const above = await answerTo(PATH, { rodSet: square, drive: drive(500, 500 * 0.2154) });
+    expect(above).toMatchObject({ passbands: [], reason: "above-apex" });
+    expect(above.apexMargin_ppm).toBeLessThan(0);
+  });
+
+  it("finds the windows of stated DC and duty cycle, whichever coupling", async () => {
+    // Edges at 60 digits (test/reference, rectangular waves).
+    const stateable = RECTANGULAR_WAVES.lines.filter(([ratio]) => ratio >= 0);
+    expect(stateable.length).toBeGreaterThan(5);
+    for (const [ratio, dutyCycle, coupling, windows] of stateable) {
+      const { passbands } = await answerTo(PATH, {
+        rodSet: rodSet(4, 1, { waveform: wave(dutyCycle, coupling) }),
+        drive: drive(1024, 1024 * ratio),
+      });
+      const edges = passbands.map(({ low, high }: { low: { q: number }; high: { q: number } | null }) => [
+        high?.q ?? 0,
+        low.q,
+      ]);
+      expectClose(edges, windows, 1e-13);
+    }
+  });
+
+  it("says when the wave's own mean drives the ions out, until DC makes up for it", async () => {
+    const waveform = wave(0.3);
+    const alone = await answerTo(PATH, { rodSet: rodSet(4, 1, { waveform }), drive: drive(500) });
+    expect(alone).toMatchObject({ passbands: [], reason: "below-lower-apex" });
+    const compensated = { rodSet: rodSet(4, 1, { waveform }), drive: drive(500, 250) };
+    expect((await answerTo(PATH, compensated)).passbands).toHaveLength(1);
+  });
+
+  it("reads the rms of a rectangular wave as its amplitude", async () => {
+    const square = rodSet(4, 1, { waveform: wave(0.5) });
+    const rms = { rf: { volts: 500, as: "rms", between: "pole-and-ground" } };
+    const asRms = await answerTo(PATH, { rodSet: square, drive: rms });
+    expect(asRms).toEqual(await answerTo(PATH, { rodSet: square, drive: drive(500) }));
+  });
+
+  it("says of an end that it was not sought rather than that ions are lost there", async () => {
+    const { passbands } = await answerTo(PATH, {
+      rodSet: rodSet(4, 1, { waveform: wave(0.01, "ac") }),
+      drive: drive(500),
+    });
+    expect(passbands[0]).toMatchObject({ low: { q: 12, lostTo: null }, high: null });
   });
 });
 

@@ -14,6 +14,10 @@ export function drive(rfVolts: number, dcVolts?: number) {
   };
 }
 
+export function wave(dutyCycle: number, coupling = "dc") {
+  return { shape: "rectangular", dutyCycle, coupling };
+}
+
 /** The same drive, stated in every other way. */
 export function otherStatementsOf(rfVolts: number, dcVolts: number) {
   const byRf = [

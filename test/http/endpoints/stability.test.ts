@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
+import { RECTANGULAR_WAVES } from "../../reference/rectangular-waves.ts";
 import { answerTo, errorsOf } from "../test-app.ts";
-import { drive, many, otherStatementsOf, rodSet } from "./requests.ts";
+import { drive, many, otherStatementsOf, rodSet, wave } from "./requests.ts";
 
 const PATH = "/v1/stability";
 const ofIons = (more: object = {}) => ({
@@ -76,6 +77,29 @@ describe("POST /v1/stability", () => {
     expect(results[1]).toMatchObject({ reason: null, stable: true });
   });
 
+  it("solves rectangular waves: half-traces and exponents of the reference", async () => {
+    // 60 digits (test/reference, rectangular waves); the plane of x alone, whose q is not negative in a request.
+    const rows = RECTANGULAR_WAVES.points.filter(([, q]) => q >= 0);
+    expect(rows.length).toBeGreaterThan(60);
+    for (const [a, q, dutyCycle, coupling, halfTrace, margin] of rows) {
+      const asked = { ...ofPoints({ a, q }), waveform: wave(dutyCycle, coupling) };
+      const [{ x }] = (await answerTo(PATH, asked)).results;
+      expect(x.stable).toBe(margin > 0);
+      expect(Math.abs(x.halfTrace - halfTrace) / Math.max(1, Math.abs(halfTrace))).toBeLessThan(1e-12);
+    }
+  });
+
+  it("guides ions above the cutoff of a square wave, q 0.7125, where a sinusoid would go on to 0.908", async () => {
+    // The first root of cos cosh = −1, that of a clamped beam: q = 0.7124936579.
+    const square = { ...ofPoints({ a: 0, q: 0.7124 }, { a: 0, q: 0.7126 }), waveform: wave(0.5) };
+    const { results } = await answerTo(PATH, square);
+    expect(results.map(({ stable }: { stable: boolean }) => stable)).toEqual([true, false]);
+    const rms = { rf: { volts: 500, as: "rms", between: "pole-and-ground" } };
+    const ofSquare = ofIons({ rodSet: rodSet(4, 1.2, { waveform: wave(0.5) }), drive: rms });
+    const peak = await answerTo(PATH, { ...ofSquare, drive: drive(500) });
+    expect(await answerTo(PATH, ofSquare)).toEqual(peak);
+  });
+
   it("answers 1,000 ions in their order and refuses 1,001", async () => {
     const ions = many(1000, 0).map((_zero, index) => ({ mz: 100 + index }));
     const { results } = await answerTo(PATH, ofIons({ ions }));
@@ -90,11 +114,9 @@ describe("POST /v1/stability", () => {
       [["/rodSet/polePairs", "needs-two-pole-pairs"]],
     ],
     [
-      "a rectangular wave",
-      ofIons({
-        rodSet: rodSet(4, 1.2, { waveform: { shape: "rectangular", dutyCycle: 0.6, coupling: "dc" } }),
-      }),
-      [["/rodSet/waveform", "waveform-not-computed"]],
+      "a rectangular wave without its coupling",
+      { ...ofPoints({ a: 0, q: 0.5 }), waveform: { shape: "rectangular", dutyCycle: 0.6 } },
+      [["/waveform/coupling", "missing-member"]],
     ],
     [
       "an ion by formula, and one without charge",
