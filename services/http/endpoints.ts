@@ -1,9 +1,12 @@
 import type { AnyEndpoint } from "./endpoint.ts";
 import { about } from "./endpoints/about.ts";
+import { driftBudget } from "./endpoints/drift-budget.ts";
 import { mathieuParameters } from "./endpoints/mathieu-parameters.ts";
+import { mzCalibration } from "./endpoints/mz-calibration.ts";
 import { passband } from "./endpoints/passband.ts";
 import { problems } from "./endpoints/problems.ts";
 import { rfOnly } from "./endpoints/rf-only.ts";
+import { scanTable } from "./endpoints/scan-table.ts";
 import { sealKeys } from "./endpoints/seal-keys.ts";
 import { selfCheck } from "./endpoints/self-check.ts";
 import { setPoints } from "./endpoints/set-points.ts";
@@ -12,6 +15,7 @@ import { signOffChecks } from "./endpoints/sign-off-checks.ts";
 import { signOffComparison } from "./endpoints/sign-off-comparison.ts";
 import { signOffVerification } from "./endpoints/sign-off-verification.ts";
 import { stability } from "./endpoints/stability.ts";
+import { trajectory } from "./endpoints/trajectory.ts";
 import { transit } from "./endpoints/transit.ts";
 
 /** Every question the service answers, in the order of the document. */
@@ -20,8 +24,12 @@ export const ENDPOINTS: readonly AnyEndpoint[] = [
   mathieuParameters,
   rfOnly,
   transit,
+  trajectory,
   passband,
   setPoints,
+  scanTable,
+  driftBudget,
+  mzCalibration,
   signOff,
   signOffVerification,
   signOffComparison,

@@ -69,15 +69,12 @@ export function driftBudgetOf(
   const causes = DRIFT_CAUSES.map((cause): CauseShift => {
     const tolerance = tolerances[cause];
     const { low, high, centre, width } = derivativesOf(window, cause);
+    // Adding zero takes the sign off a zero.
+    const shiftBy = (derivative: number) => derivative * tolerance + 0;
     return {
       cause,
       tolerance,
-      shifts: {
-        low: low * tolerance,
-        high: high * tolerance,
-        centre: centre * tolerance,
-        width: width * tolerance,
-      },
+      shifts: { low: shiftBy(low), high: shiftBy(high), centre: shiftBy(centre), width: shiftBy(width) },
     };
   });
   return {

@@ -11,7 +11,7 @@ export interface paths {
         put?: never;
         /**
          * Whether ions or points (a, q) are stable, and which rods take them if not
-         * @description Solves the Mathieu equation in both planes. a and q belong to x, −a and −q to y. Beyond |a| or q of 100 nothing is computed and reason says so. Stable means bounded for ever in an ideal field, not that the ion fits between the rods.
+         * @description Solves the Mathieu equation in both planes, or with a rectangular wave the Meissner equation, in which V is half the swing of the wave and a only the DC besides it. a and q belong to x, −a and −q to y. Beyond |a| or q of 100, under a rectangular wave also where rounding would show before, nothing is computed and reason says so. Stable means bounded for ever in an ideal field, not that the ion fits between the rods.
          */
         post: operations["stability"];
         delete?: never;
@@ -80,6 +80,26 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/v1/trajectory": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * The path of one ion, where and when it is lost, and what stands on the rods
+         * @description x(t) and y(t) of an ion in the ideal field, by exact propagators of the linear equation; the envelope; where and when it first reaches r0; the share of a cycle in which the rods are positive, their largest voltage against ground; on request field and force at a point. At most 20000 samples, a cycle counting as 10 at least. Nothing is computed beyond |a| or q of 100. An ion that is unstable is not lost at once, and a stable one can still be too large for the rods. x are the rods whose DC has the sign of the ion.
+         */
+        post: operations["trajectory"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/v1/passband": {
         parameters: {
             query?: never;
@@ -91,7 +111,7 @@ export interface paths {
         put?: never;
         /**
          * The m/z that a mass filter lets through
-         * @description Where the scan line a/q = 2U/V enters and leaves the first stability region, exactly. The edge at low m/z is β_x = 1 (light ions are lost to the x rods), the edge at high m/z is β_y = 0. Real peaks are narrower or wider than the distance of the edges, by residence and beam.
+         * @description Where the scan line a/q = 2U/V enters and leaves a stability region, exactly: the first unless the request names another. There the edge at low m/z is β_x = 1 (light ions are lost to the x rods), the edge at high m/z β_y = 0. Rods may run a sinusoid or a rectangular wave; a DC-coupled rectangular wave filters by its duty cycle alone. Real peaks are narrower or wider than the distance of the edges, by residence and beam.
          */
         post: operations["passband"];
         delete?: never;
@@ -110,10 +130,70 @@ export interface paths {
         get?: never;
         put?: never;
         /**
-         * The RF and DC that give passbands of wanted position and width
-         * @description The inverse of the passband, solved exactly: the passband of the calculated volts is centred on the m/z of the ion and as wide as asked. Calculated volts are not settings to apply, and they may exceed any supply.
+         * The RF and DC, or the frequency, that give passbands of wanted position and width
+         * @description The inverse of the passband, solved exactly: the passband of the calculated drive is centred on the m/z of the ion and as wide as asked, in the region asked for. A rectangular wave has set points in its first region, by volts or by frequency, with DC or by its duty cycle alone. Calculated volts are not settings to apply, and they may exceed any supply.
          */
         post: operations["setPoints"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/v1/scan-table": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Set points over a range, the straight line in their place, and the fastest scan
+         * @description Exact set points at constant width or constant resolution; the straight lines U = slope · V − offset that fit them best, by least squares and by the least worst width, with the worst width that each really gives (light ions break it) and where it passes nothing; and the fastest scan rate for a permitted loss. Calculated volts are not settings to apply. As text/csv the rows alone.
+         */
+        post: operations["scanTable"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/v1/drift-budget": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * What tolerances do to a window, what they may be, and when to tune again
+         * @description First-order shifts of edges, centre and width by exact derivatives: m/z goes as the amplitude and as 1/(f r0)², and U/V moves the edges against each other. Causes are independent; the worst case adds them, the root-sum-square does not. Backwards, the tolerance each cause may have for a wanted limit. From successive tune records, how long the offset stays within a limit.
+         */
+        post: operations["driftBudget"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/v1/mz-calibration": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Position and width of measured peaks as a line, what each peak pulls, and what to expect between
+         * @description Weighted least squares of observed less set m/z and of the width, with standard uncertainties from the scatter of the residuals, leverage and Cook distance of each peak, prediction intervals (Student t at the stated confidence) and a mark on extrapolations; and, where volts are stated, the field radius that they imply. sigma weighs peaks against each other; the scatter sets the scale, and for one more peak the largest stated sigma counts.
+         */
+        post: operations["mzCalibration"];
         delete?: never;
         options?: never;
         head?: never;
@@ -308,6 +388,20 @@ export interface components {
             cautions: string[];
         };
         Acquisition: components["schemas"]["Transition"] | components["schemas"]["SelectedIon"] | components["schemas"]["Scan"] | components["schemas"]["ProductScan"] | components["schemas"]["PrecursorScan"] | components["schemas"]["NeutralLossScan"];
+        AllowedTolerance: {
+            /**
+             * @description amplitude: U and V together. ratio: U against V at constant V.
+             * @enum {string}
+             */
+            cause: "field-radius" | "frequency" | "amplitude" | "ratio";
+            /** @description If nothing else drifts; null where unbounded. */
+            alone_ppm: number | null;
+            /** @description If all four causes contribute equally and add up. */
+            sharedWorstCase_ppm: number | null;
+            /** @description If all four causes contribute equally and independently, as root-sum-square. */
+            sharedRootSumSquare_ppm: number | null;
+            boundBy: ("centreShift" | "edgeShift" | "widthChange") | null;
+        };
         /** @description The laboratory's limits of apex-margin. How far U/V stays below the apex of the stability region, where the window closes: the smallest margin of a stage. */
         ApexMarginCriterion: {
             /** @description Whether the check counts in the verdict, also where it is indeterminate. */
@@ -338,6 +432,53 @@ export interface components {
         Bounds: {
             min: number | null;
             max: number | null;
+        };
+        CalibrationLine: {
+            /** @description Of powers of the set m/z, 0 upwards. */
+            coefficients: {
+                power: number;
+                value: number;
+                standardUncertainty: number | null;
+            }[];
+            degreesOfFreedom: number;
+            /** @description In m/z; where sigma is stated, in units of it. null without degrees of freedom. */
+            residualStandardDeviation: number | null;
+            influences: components["schemas"]["PeakInfluence"][];
+            /** @description The peak with the largest Cook distance, by its index. */
+            mostInfluential: number | null;
+        };
+        CalibrationPeak: {
+            /** @description The m/z that was set. */
+            setMz: number;
+            /** @description The m/z at which the peak was observed. */
+            observedMz: number;
+            /** @description Standard uncertainty of observedMz; stated for all peaks or for none. */
+            sigma?: number;
+            width?: components["schemas"]["Width"];
+            /** @description The volts at this peak, for the effective field radius. */
+            drive?: components["schemas"]["Drive"];
+        };
+        CalibrationPrediction: {
+            setMz: number;
+            /** @description Outside the set m/z of the peaks. */
+            extrapolated: boolean;
+            offset: {
+                value: number;
+                /** @description Of the fit itself. */
+                standardUncertainty: number | null;
+                /** @description Of the interval for one more peak. */
+                low: number | null;
+                high: number | null;
+            } | null;
+            observedMz: number | null;
+            width: {
+                value: number;
+                /** @description Of the fit itself. */
+                standardUncertainty: number | null;
+                /** @description Of the interval for one more peak. */
+                low: number | null;
+                high: number | null;
+            } | null;
         };
         CapabilityChecked: {
             capability: string;
@@ -625,6 +766,141 @@ export interface components {
             /** @description DC of the y pair against ground, in V. */
             pairY_V: number;
         };
+        DriftBudget: {
+            /** @description Each at the positive end of its tolerance; the negative end gives the opposite sign. */
+            causes: {
+                /**
+                 * @description amplitude: U and V together. ratio: U against V at constant V.
+                 * @enum {string}
+                 */
+                cause: "field-radius" | "frequency" | "amplitude" | "ratio";
+                tolerance_ppm: number;
+                /** @description Of the edge at low m/z. */
+                low: number;
+                /** @description Of the edge at high m/z. */
+                high: number;
+                centre: number;
+                width: number;
+            }[];
+            worstCase: components["schemas"]["DriftShifts"];
+            rootSumSquare: components["schemas"]["DriftShifts"];
+            /** @description The exact width with U/V at either end of its tolerance, to judge the first order by; near the apex it is not good. */
+            widthAtRatioEnds: {
+                /** @description null: the window closes before that. */
+                raised: number | null;
+                lowered: number | null;
+            };
+        };
+        DriftBudgetAnswer: {
+            window: {
+                mzLow: number;
+                mzHigh: number;
+                mzCentre: number;
+                mzWidth: number;
+                resolution: number;
+                /** @description How far U/V lies below the apex, in ppm of it. */
+                apexMargin_ppm: number;
+            } | null;
+            /** @description Why there is no window. no-dc: an RF-only rod set has a cutoff but no window; its cutoff moves as the amplitude and as 1/f² and 1/r0². */
+            reason: ("above-apex" | "no-rf" | "no-dc" | "width-height-needs-peak-profile" | "resolution-not-reachable" | "not-converged") | null;
+            /** @description Shift in m/z per ppm of each cause. */
+            sensitivities: {
+                /**
+                 * @description amplitude: U and V together. ratio: U against V at constant V.
+                 * @enum {string}
+                 */
+                cause: "field-radius" | "frequency" | "amplitude" | "ratio";
+                /** @description Of the edge at low m/z. */
+                low: number;
+                /** @description Of the edge at high m/z. */
+                high: number;
+                centre: number;
+                width: number;
+            }[];
+            /** @description null without tolerances or without a window. */
+            budget: components["schemas"]["DriftBudget"] | null;
+            /** @description null without limits or without a window. */
+            allowed: components["schemas"]["AllowedTolerance"][] | null;
+            /** @description null without tune records. */
+            retune: components["schemas"]["RetuneInterval"] | null;
+        };
+        /** @description The window that these volts open. */
+        DriftBudgetOfDrive: {
+            rodSet: components["schemas"]["RodSet"];
+            drive: components["schemas"]["Drive"];
+            /** @description Independent tolerances; one that is absent does not drift. */
+            tolerances?: {
+                /** @description Relative tolerance, plus or minus, in ppm. */
+                fieldRadius_ppm?: number;
+                /** @description Relative tolerance, plus or minus, in ppm. */
+                frequency_ppm?: number;
+                /** @description U and V moving together, plus or minus, in ppm. */
+                amplitude_ppm?: number;
+                /** @description U against V at constant V, plus or minus, in ppm. */
+                ratio_ppm?: number;
+            };
+            /** @description What may move, for the question backwards: at least one of the three. */
+            limits?: {
+                /** @description Largest permitted shift of the centre, plus or minus, in m/z. */
+                centreShift?: number;
+                /** @description Largest permitted shift of either edge, plus or minus, in m/z. */
+                edgeShift?: number;
+                /** @description Largest permitted change of the width, plus or minus, in m/z. */
+                widthChange?: number;
+            };
+            /** @description Successive tunes without a correction between them, for the retune interval. */
+            tune?: {
+                records: components["schemas"]["TuneRecord"][];
+                /** @description Largest permitted offset, plus or minus, in m/z. */
+                limit: number;
+                /** @description Confidence of the two-sided interval, such as 0.95. No default: the laboratory decides. */
+                confidence: number;
+            };
+        };
+        /** @description A window with nothing known of the instrument. */
+        DriftBudgetOfWidth: {
+            /** @description Mass-to-charge ratio m/z of the ion, dimensionless. */
+            mzCentre: number;
+            width: components["schemas"]["Width"];
+            /** @description Independent tolerances; one that is absent does not drift. */
+            tolerances?: {
+                /** @description Relative tolerance, plus or minus, in ppm. */
+                fieldRadius_ppm?: number;
+                /** @description Relative tolerance, plus or minus, in ppm. */
+                frequency_ppm?: number;
+                /** @description U and V moving together, plus or minus, in ppm. */
+                amplitude_ppm?: number;
+                /** @description U against V at constant V, plus or minus, in ppm. */
+                ratio_ppm?: number;
+            };
+            /** @description What may move, for the question backwards: at least one of the three. */
+            limits?: {
+                /** @description Largest permitted shift of the centre, plus or minus, in m/z. */
+                centreShift?: number;
+                /** @description Largest permitted shift of either edge, plus or minus, in m/z. */
+                edgeShift?: number;
+                /** @description Largest permitted change of the width, plus or minus, in m/z. */
+                widthChange?: number;
+            };
+            /** @description Successive tunes without a correction between them, for the retune interval. */
+            tune?: {
+                records: components["schemas"]["TuneRecord"][];
+                /** @description Largest permitted offset, plus or minus, in m/z. */
+                limit: number;
+                /** @description Confidence of the two-sided interval, such as 0.95. No default: the laboratory decides. */
+                confidence: number;
+            };
+        };
+        DriftBudgetRequest: components["schemas"]["DriftBudgetOfDrive"] | components["schemas"]["DriftBudgetOfWidth"];
+        /** @description Shifts in m/z, to first order. */
+        DriftShifts: {
+            /** @description Of the edge at low m/z. */
+            low: number;
+            /** @description Of the edge at high m/z. */
+            high: number;
+            centre: number;
+            width: number;
+        };
         /** @description The voltages on a rod set. x is the pair whose DC has the sign of the ion. */
         Drive: {
             rf: components["schemas"]["Rf"];
@@ -664,7 +940,7 @@ export interface components {
             /** @description JSON Pointer (RFC 6901) to the member; empty for the body. */
             pointer: string;
             /** @enum {string} */
-            code: "unknown-member" | "missing-member" | "wrong-type" | "not-whole" | "out-of-range" | "not-one-of" | "wrong-length" | "wrong-count" | "wrong-format" | "duplicate-member" | "too-deep" | "not-unique" | "not-found" | "not-above" | "not-below" | "charge-is-zero" | "charge-against-polarity" | "limits-crossed" | "stages-do-not-fit" | "needs-two-pole-pairs" | "dc-not-taken" | "ion-trap-not-computed" | "formula-not-computed" | "waveform-not-computed" | "region-not-computed";
+            code: "unknown-member" | "missing-member" | "wrong-type" | "not-whole" | "out-of-range" | "not-one-of" | "wrong-length" | "wrong-count" | "wrong-format" | "duplicate-member" | "too-deep" | "not-unique" | "not-found" | "not-above" | "not-below" | "charge-is-zero" | "charge-against-polarity" | "limits-crossed" | "stages-do-not-fit" | "needs-two-pole-pairs" | "member-not-taken" | "dc-not-taken" | "ion-trap-not-computed" | "formula-not-computed" | "waveform-not-computed" | "region-not-computed";
             /** @description What was found and what is expected, for a person. */
             detail: string;
         };
@@ -988,6 +1264,39 @@ export interface components {
             compounds?: components["schemas"]["Compound"][];
             acquisition: components["schemas"]["Acquisition"][];
         };
+        MzCalibrationAnswer: {
+            /** @description Observed less set m/z against set m/z. */
+            position: components["schemas"]["CalibrationLine"] | null;
+            positionReason: ("too-few-points" | "too-few-different-points" | "widths-at-different-heights") | null;
+            /** @description Width in m/z against set m/z, linear, of the peaks that state one. */
+            width: components["schemas"]["CalibrationLine"] | null;
+            widthReason: ("too-few-points" | "too-few-different-points" | "widths-at-different-heights") | null;
+            widthAt: ("edges" | "half-height" | "tenth-height") | null;
+            predictions: components["schemas"]["CalibrationPrediction"][];
+            /** @description The r0 with which the stated volts centre their window on the observed m/z; null where no peak states its drive. */
+            effectiveFieldRadius: {
+                mean_mm: number | null;
+                /** @description Scatter of the peaks; null with fewer than two. */
+                standardDeviation_mm: number | null;
+                peaks: {
+                    peak: number;
+                    fieldRadius_mm: number | null;
+                    /** @description no-window: these volts pass nothing, or everything above a cutoff. */
+                    reason: "no-window" | null;
+                }[];
+            } | null;
+        };
+        MzCalibrationRequest: {
+            peaks: components["schemas"]["CalibrationPeak"][];
+            /** @description Degree of the polynomial of observed less set m/z: 1 linear, 2 quadratic. */
+            positionDegree: number;
+            /** @description Confidence of the two-sided interval, such as 0.95. No default: the laboratory decides. */
+            confidence: number;
+            /** @description Set m/z at which to predict. */
+            wanted?: number[];
+            /** @description Needed where a peak states its drive. */
+            frequency_MHz?: number;
+        };
         Neighbour: {
             ion: components["schemas"]["Ion"];
             /** @description Response of the neighbour as a fraction of the target's. */
@@ -1101,10 +1410,16 @@ export interface components {
         };
         /** @description The m/z that are stable in both planes in an ideal field after any number of RF cycles. */
         Passband: {
-            region: components["schemas"]["RegionName"];
+            /** @description null for a region without a name: see bands. */
+            region: components["schemas"]["RegionName"] | null;
+            /** @description The bands n_x and n_y of the region. */
+            bands: {
+                x: number;
+                y: number;
+            };
             /** @description m/z of the edge below which ions are lost. */
             mzLow: number;
-            /** @description m/z of the edge above which ions are lost; null when there is no DC, so no upper edge. */
+            /** @description m/z of the edge above which ions are lost; null where the field has no mean, so that there is no upper edge. */
             mzHigh: number | null;
             /** @description Half-way between both edges in m/z. */
             mzCentre: number | null;
@@ -1116,26 +1431,27 @@ export interface components {
             high: components["schemas"]["PassbandEdge"] | null;
         };
         PassbandAnswer: {
-            /** @description Empty when nothing passes; reason says why. */
+            /** @description The windows in the region asked for, by falling m/z; empty when nothing passes, and reason says why. */
             passbands: components["schemas"]["Passband"][];
-            /** @description Why there is no passband. width-height-needs-peak-profile: the width is not taken at the edges, and this version cannot convert it. */
-            reason: ("above-apex" | "no-rf" | "width-height-needs-peak-profile" | "resolution-not-reachable" | "not-converged") | null;
+            /** @description What the same volts let through in other regions, the second window near 0.12 of an RF-only cutoff for one; null where that was not found out. */
+            otherWindows: components["schemas"]["Passband"][] | null;
+            /** @description Windows at q above this, that is, at very low m/z, are not sought. */
+            searchedToQ: number | null;
+            /** @description Why there is no passband. above-apex: U/V is at or above that at which the first region closes. below-lower-apex: the mean of the rectangular wave drives the ions out and the DC does not make up for it. scan-line-misses-region: the line of this U/V does not cross the region asked for. width-height-needs-peak-profile: the width is not taken at the edges, and this version cannot convert it. */
+            reason: ("above-apex" | "below-lower-apex" | "scan-line-misses-region" | "no-rf" | "width-height-needs-peak-profile" | "resolution-not-reachable" | "not-converged") | null;
             /** @description U/V, both pole-to-ground, V zero-to-peak; null without RF. */
             dcToRfRatio: number | null;
-            /** @description U/V at which the first region closes. */
-            apexRatio: number;
-            /** @description How far U/V lies below the apex, in ppm of the apex; negative above it. */
+            /** @description U/V at which the first region closes; with a rectangular wave that of its duty cycle, null where it lies outside the computed domain. */
+            apexRatio: number | null;
+            /** @description How far U/V lies below the apex, in ppm of the apex; negative above it. null without RF, and where the apex is not above zero. */
             apexMargin_ppm: number | null;
         };
         /** @description Where the scan line leaves the region. */
         PassbandEdge: {
             a: number;
             q: number;
-            /**
-             * @description The rods that take an ion just outside this edge: light ions x, heavy ions y.
-             * @enum {string}
-             */
-            lostTo: "x" | "y";
+            /** @description The rods that take an ion just outside this edge; in the first region light ions x, heavy ones y. null where the window goes on beyond this q, but no edge is sought there. */
+            lostTo: ("x" | "y") | null;
         };
         /** @description What do these volts let through? */
         PassbandOfDrive: {
@@ -1170,6 +1486,17 @@ export interface components {
             waiver?: components["schemas"]["Waiver"];
             pass?: components["schemas"]["LowerLimit"];
             caution?: components["schemas"]["LowerLimit"];
+        };
+        PeakInfluence: {
+            /** @description Index in the request's peaks. */
+            peak: number;
+            residual: number;
+            /** @description 0 to 1: at 1 the fit follows this peak whatever it says. */
+            leverage: number;
+            /** @description Residual over its scatter without this peak; beyond about 3 the peak does not belong. */
+            studentizedResidual: number | null;
+            /** @description How far the whole fit moves without this peak, over its own uncertainty. */
+            cookDistance: number | null;
         };
         /** @description The laboratory's limits of peak-tails. Nothing: it stands here so that nobody takes its absence for a result. */
         PeakTailsCriterion: {
@@ -1362,13 +1689,19 @@ export interface components {
              * @enum {string}
              */
             shape: "rectangular";
-            /** @description Fraction of a period at the positive level on the x pair. */
+            /** @description Fraction of a period in which the x pair is at the level that has the sign of the ion. */
             dutyCycle: number;
             /**
              * @description dc: the mean of the wave reaches the rods and acts as DC; ac: it does not.
              * @enum {string}
              */
             coupling: "dc" | "ac";
+        };
+        /** @description A stability region: its bands n_x and n_y, and its name if it has one. */
+        Region: {
+            x: number;
+            y: number;
+            name: components["schemas"]["RegionName"] | null;
         };
         /**
          * @description A stability region by its bands (n_x, n_y): first (0,0), second (1,1), third (1,0).
@@ -1394,6 +1727,18 @@ export interface components {
             start_min: number;
             /** @description End of the retention window in min. */
             end_min: number;
+        };
+        RetuneInterval: {
+            /** @description Why there is no expected interval. drift-not-distinguishable: the slope is within its uncertainty at this confidence. A slope with its uncertainty needs three records. */
+            reason: ("too-few-records" | "records-at-one-time" | "drift-not-distinguishable" | "limit-already-reached") | null;
+            /** @description Drift in m/z per hour, by least squares. */
+            slope_perHour: number | null;
+            slopeStandardUncertainty_perHour: number | null;
+            degreesOfFreedom: number;
+            /** @description Hours after the last record until the line reaches the limit. */
+            expected_h: number | null;
+            /** @description Hours after the last record until the interval of a single offset reaches the limit; null beyond a century. */
+            atConfidence_h: number | null;
         };
         /** @description An RF voltage with the convention in which it is stated. */
         Rf: {
@@ -1453,6 +1798,13 @@ export interface components {
             /** @description Whether the effective potential at 0.8 r0 exceeds maxRadialEnergy_eVPerCharge. null when that is not stated, and where η at 0.8 r0 is above 0.3, so that the effective potential proves nothing. */
             confined: boolean | null;
         };
+        RodPotential: {
+            dcToGround_V: number;
+            /** @description Share of an RF cycle in which these rods are positive against ground. */
+            positiveShare: number;
+            /** @description Largest magnitude against ground. */
+            peakToGround_V: number;
+        };
         /** @description The geometry and the drive frequency of a rod set. */
         RodSet: {
             /** @description Field radius r0 in mm: half the gap between opposite rods, not the rod radius and not the diameter. */
@@ -1501,6 +1853,50 @@ export interface components {
             waiver?: components["schemas"]["Waiver"];
             pass?: components["schemas"]["UpperLimit"];
             caution?: components["schemas"]["UpperLimit"];
+        };
+        ScanTableAnswer: {
+            convention: components["schemas"]["VoltageConvention"];
+            rows: components["schemas"]["ScanTableRow"][];
+            /** @description Judged at 129 m/z evenly spaced in the logarithm, independent of the rows, where there is a set point. */
+            lines: components["schemas"]["StraightScanLine"][];
+            /** @description Why a line is missing. */
+            linesReason: ("too-few-set-points" | "least-worst-width-not-converged") | null;
+            /** @description The fastest rate that keeps the loss over all rows. From peak shapes at 228 RF cycles; the position of a peak holds only if calibrated at that rate. */
+            fastest: {
+                rate_mzPerS: number;
+                /** @description The row that sets it. */
+                mz: number;
+                /** @description How far the window moves during the flight, over its width, for the permitted loss. */
+                shiftOverWidth: number;
+            } | null;
+        };
+        ScanTableRequest: {
+            rodSet: components["schemas"]["RodSet"];
+            convention: components["schemas"]["VoltageConvention"];
+            /** @description Mass-to-charge ratio m/z of the ion, dimensionless. */
+            mzFrom: number;
+            /** @description Mass-to-charge ratio m/z of the ion, dimensionless. */
+            mzTo: number;
+            /** @description Rows, evenly spaced in m/z, both ends included. */
+            points: number;
+            /** @description Constant width in m/z, or constant resolution. */
+            width: components["schemas"]["Width"];
+            /** @description For the fastest scan rate. */
+            residence?: components["schemas"]["Residence"];
+            /** @description Share of the peak height that may be lost because the window moves during the flight; needed with residence. */
+            permittedLoss?: number;
+        };
+        ScanTableRow: {
+            mz: number;
+            /** @description Calculated volts; not settings to apply. */
+            drive: components["schemas"]["Drive"] | null;
+            reason: ("width-height-needs-peak-profile" | "resolution-not-reachable" | "drive-out-of-range" | "not-converged") | null;
+            a: number | null;
+            q: number | null;
+            mzLow: number | null;
+            mzHigh: number | null;
+            /** @description Fastest scan at this m/z for the permitted loss; null without residence. */
+            fastestRate_mzPerS: number | null;
         };
         /** @description Shows that nothing was altered since; no person's electronic signature. */
         Seal: {
@@ -1591,13 +1987,17 @@ export interface components {
             mz: number;
             /** @description Calculated volts in the convention of the request; not settings to apply. */
             drive: components["schemas"]["Drive"] | null;
-            /** @description Why there is no drive. width-height-needs-peak-profile: the width is not taken at the edges, and this version cannot convert it. resolution-not-reachable: no window of the first region is wider than twice its m/z. drive-out-of-range: the volts are beyond what a request may state. */
-            reason: ("width-height-needs-peak-profile" | "resolution-not-reachable" | "drive-out-of-range" | "not-converged") | null;
+            /** @description The frequency that goes with these volts. */
+            frequency_MHz: number | null;
+            /** @description The duty cycle that goes with these volts; null with a sinusoid. */
+            dutyCycle: number | null;
+            /** @description Why there is no drive. width-height-needs-peak-profile: the width is not taken at the edges, and this version cannot convert it. resolution-not-reachable: the region has no window so wide, or none so narrow is computed. needs-reversed-dc: the DC would have to have the other sign, which exchanges x and y: state the duty cycle 1 − d and the other tip. drive-out-of-range, frequency-out-of-range: beyond what a request may state. outside-computed-domain: the wave opens the window at a q beyond those that are computed. */
+            reason: ("width-height-needs-peak-profile" | "resolution-not-reachable" | "needs-reversed-dc" | "drive-out-of-range" | "frequency-out-of-range" | "outside-computed-domain" | "not-converged") | null;
             /** @description a of the ion at the set point. */
             a: number | null;
             /** @description q of the ion at the set point. */
             q: number | null;
-            /** @description What the calculated volts let through. */
+            /** @description What the calculated drive lets through. */
             passband: components["schemas"]["Passband"] | null;
         };
         SetPointsAnswer: {
@@ -1606,11 +2006,25 @@ export interface components {
         SetPointsRequest: {
             rodSet: components["schemas"]["RodSet"];
             convention: components["schemas"]["VoltageConvention"];
+            /** @description The region in which the window shall lie; the first when absent. */
+            region?: components["schemas"]["RegionName"];
             /**
-             * @description The region in which to look; the first when absent.
+             * @description A window closes at two tips of its region, so that two U/V give the same resolution: towards the tip of largest U/V (when absent), or towards that of smallest U/V. In the third region these are (q, a) = (3.234, 3.164), the usual choice, and (2.815, 2.521). Those of the first and second region differ in nothing but the names x and y, so that with a sinusoid it has no effect there. With a rectangular wave: U/V above or below that of the open window.
              * @enum {string}
              */
-            region?: "first" | "second" | "third" | "any";
+            tip?: "high-ratio" | "low-ratio";
+            /**
+             * @description What puts the window on the ion: the RF volts at the frequency of the rod set (when absent), or the frequency at the RF volts of `rf`. The frequency of the rod set is then not used.
+             * @enum {string}
+             */
+            solveFor?: "volts" | "frequency";
+            /** @description The RF volts that are kept when the frequency is solved for. */
+            rf?: components["schemas"]["Rf"];
+            /**
+             * @description What makes the width: the DC (when absent), or, with a DC-coupled rectangular wave, its duty cycle alone without DC. The duty cycle of the rod set is then not used, and that of the answer is above a half: x is the pair that is longer at the level with the sign of the ion.
+             * @enum {string}
+             */
+            widthBy?: "dc" | "duty-cycle";
             /** @description Not used by widths taken at the edges. */
             residence?: components["schemas"]["Residence"];
             /** @description Not used by widths taken at the edges. */
@@ -1720,18 +2134,43 @@ export interface components {
             q: number;
             stable: boolean | null;
             reason: "outside-computed-domain" | null;
-            /** @description The bands n_x and n_y of a stable ion, and the name of the region if it has one. */
-            region: {
-                x: number;
-                y: number;
-                name: components["schemas"]["RegionName"] | null;
-            } | null;
+            /** @description The region of a stable ion. */
+            region: components["schemas"]["Region"] | null;
             /** @description The rods that take an unstable ion; x are those whose DC has the sign of the ion. */
             lostTo: ("x" | "y" | "both") | null;
             x: components["schemas"]["PlaneStability"];
             y: components["schemas"]["PlaneStability"];
         };
         Stage: components["schemas"]["MassFilterStage"] | components["schemas"]["CollisionCellStage"] | components["schemas"]["IonGuideStage"] | components["schemas"]["IonTrapStage"];
+        /** @description A straight line in place of the exact set points. */
+        StraightScanLine: {
+            /**
+             * @description least-squares: of U over the judged m/z. least-worst-width: the line whose largest width error over them is least.
+             * @enum {string}
+             */
+            sense: "least-squares" | "least-worst-width";
+            /** @description U/V of the line, U and V between the same points and V zero-to-peak. */
+            dcSlope: number;
+            /** @description U = dcSlope V − dcOffset_V, in V between the points that the convention names for DC. */
+            dcOffset_V: number;
+            /** @description The m/z at which the width is furthest from the wanted one. */
+            worst: {
+                mz: number;
+                wantedWidth: number;
+                width: number | null;
+                /** @description Width less the wanted width. */
+                error: number | null;
+                /** @description Centre of the window less m/z. */
+                centreShift: number | null;
+                /** @description above-apex: nothing passes. no-dc: the line asks for no DC, and the window has no upper end. */
+                reason: ("above-apex" | "no-dc") | null;
+            };
+            /** @description The part of the range in which the line lies above the apex. */
+            nothingPasses: {
+                mzFrom: number;
+                mzTo: number;
+            } | null;
+        };
         /** @description What a finding is about. */
         Subject: {
             /** @description JSON Pointer into the request. */
@@ -1798,6 +2237,96 @@ export interface components {
             /** @description Uncertainty of the m/z calibration, plus or minus, in m/z. */
             mzCalibration?: number;
         };
+        TrajectoryAnswer: {
+            mz: number;
+            a: number;
+            q: number;
+            /** @description null outside the computed domain. */
+            flight: {
+                /** @description RF cycles in the field if the ion is not lost. */
+                rfCycles: number;
+                /** @description Equally spaced samples from the entrance, and a last one at the exit or where the ion is lost. */
+                samples: {
+                    time_us: number[];
+                    x_mm: number[];
+                    y_mm: number[];
+                };
+                envelope: {
+                    x: components["schemas"]["TrajectoryEnvelope"];
+                    y: components["schemas"]["TrajectoryEnvelope"];
+                };
+                /** @description Where |x| or |y| first reaches r0, found between the samples. */
+                lost: {
+                    /** @enum {string} */
+                    to: "x" | "y";
+                    at_us: number;
+                    atCycle: number;
+                    x_mm: number;
+                    y_mm: number;
+                } | null;
+                end: {
+                    time_us: number;
+                    x_mm: number;
+                    y_mm: number;
+                    vx_mPerS: number;
+                    vy_mPerS: number;
+                };
+            } | null;
+            reason: "outside-computed-domain" | null;
+            /** @description What stands on the rods. The rod offset counts where the drive states both pairs; else ground is the axis. */
+            rods: {
+                x: components["schemas"]["RodPotential"];
+                y: components["schemas"]["RodPotential"];
+                rodOffset_V: number | null;
+            };
+            /** @description null where no point was asked for. */
+            fieldAt: {
+                /** @description Against the axis. */
+                potential_V: number;
+                fieldX_VPerM: number;
+                fieldY_VPerM: number;
+                forceX_N: number;
+                forceY_N: number;
+            } | null;
+        };
+        TrajectoryEnvelope: {
+            /** @description Largest distance from the axis during the flight. */
+            largest_mm: number;
+            at_us: number;
+            /** @description Largest distance that an ion with this start could ever reach in a field without end; null where the motion is unstable. */
+            largestEver_mm: number | null;
+        };
+        TrajectoryRequest: {
+            rodSet: components["schemas"]["RodSet"];
+            drive: components["schemas"]["Drive"];
+            ion: components["schemas"]["Ion"];
+            start: components["schemas"]["TrajectoryStart"];
+            residence: components["schemas"]["Residence"];
+            /** @description Samples in each RF cycle; at most 20,000 in all. */
+            samplesPerCycle: number;
+            /** @description A point at which to state potential, field and force. */
+            fieldAt?: {
+                /** @description Position in x, in mm from the axis. */
+                x_mm: number;
+                /** @description Position in y, in mm from the axis. */
+                y_mm: number;
+                /** @description RF phase in degrees. At 0 the RF on the x pair has the sign opposite to the ion's at its largest. */
+                phase_deg: number;
+            };
+        };
+        /** @description How the ion enters the field. */
+        TrajectoryStart: {
+            /** @description Position in x, in mm from the axis. */
+            x_mm: number;
+            /** @description Position in y, in mm from the axis. */
+            y_mm: number;
+            /** @description Velocity in x, in m/s. */
+            vx_mPerS: number;
+            /** @description Velocity in y, in m/s. */
+            vy_mPerS: number;
+            /** @description RF phase in degrees. At 0 the RF on the x pair has the sign opposite to the ion's at its largest. */
+            phase_deg: number;
+        };
         TransitAnswer: {
             results: components["schemas"]["TransitResult"][];
         };
@@ -1855,6 +2384,12 @@ export interface components {
             /** @description Window that the method claims for the product. */
             productWidth?: components["schemas"]["Width"];
             cell?: components["schemas"]["CellSetting"];
+        };
+        TuneRecord: {
+            /** @description When the tune was done, in hours after any instant. */
+            time_h: number;
+            /** @description Observed less set m/z at that tune. */
+            offset: number;
         };
         TwoSidedLimit: {
             /** @description Smallest value, in the unit of the finding. */
@@ -2064,7 +2599,7 @@ export interface operations {
                 };
             };
             /**
-             * @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where.
+             * @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.
              *
              *     `too-much-work`: Each part is valid, but together they cost more than one request may.
              */
@@ -2158,7 +2693,7 @@ export interface operations {
                 };
             };
             /**
-             * @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where.
+             * @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.
              *
              *     `too-much-work`: Each part is valid, but together they cost more than one request may.
              */
@@ -2252,7 +2787,7 @@ export interface operations {
                 };
             };
             /**
-             * @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where.
+             * @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.
              *
              *     `too-much-work`: Each part is valid, but together they cost more than one request may.
              */
@@ -2346,7 +2881,101 @@ export interface operations {
                 };
             };
             /**
-             * @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where.
+             * @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.
+             *
+             *     `too-much-work`: Each part is valid, but together they cost more than one request may.
+             */
+            422: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    trajectory: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** @description The path of one ion, where and when it is lost, and what stands on the rods */
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["TrajectoryRequest"];
+            };
+        };
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TrajectoryAnswer"];
+                };
+            };
+            /**
+             * @description `malformed-json`: The body is empty, is not well-formed JSON in UTF-8, or its top level is no object.
+             *
+             *     `interrupted-body`: The connection ended, or fewer bytes came than Content-Length announced.
+             */
+            400: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `body-too-large`: The body is larger than the limit that GET /v1/about shows. */
+            413: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `unsupported-media-type`: Content-Type is not application/json (with or without charset=utf-8), or the body is compressed. */
+            415: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /**
+             * @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.
              *
              *     `too-much-work`: Each part is valid, but together they cost more than one request may.
              */
@@ -2439,7 +3068,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where. */
+            /** @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where. */
             422: {
                 headers: {
                     "X-Request-Id": components["headers"]["RequestId"];
@@ -2468,7 +3097,7 @@ export interface operations {
             path?: never;
             cookie?: never;
         };
-        /** @description The RF and DC that give passbands of wanted position and width */
+        /** @description The RF and DC, or the frequency, that give passbands of wanted position and width */
         requestBody: {
             content: {
                 "application/json": components["schemas"]["SetPointsRequest"];
@@ -2530,10 +3159,285 @@ export interface operations {
                 };
             };
             /**
-             * @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where.
+             * @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.
              *
              *     `too-much-work`: Each part is valid, but together they cost more than one request may.
              */
+            422: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    scanTable: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** @description Set points over a range, the straight line in their place, and the fastest scan */
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ScanTableRequest"];
+            };
+        };
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ScanTableAnswer"];
+                    "text/csv": string;
+                };
+            };
+            /**
+             * @description `malformed-json`: The body is empty, is not well-formed JSON in UTF-8, or its top level is no object.
+             *
+             *     `interrupted-body`: The connection ended, or fewer bytes came than Content-Length announced.
+             */
+            400: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `body-too-large`: The body is larger than the limit that GET /v1/about shows. */
+            413: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `unsupported-media-type`: Content-Type is not application/json (with or without charset=utf-8), or the body is compressed. */
+            415: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /**
+             * @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.
+             *
+             *     `too-much-work`: Each part is valid, but together they cost more than one request may.
+             */
+            422: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    driftBudget: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** @description What tolerances do to a window, what they may be, and when to tune again */
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["DriftBudgetRequest"];
+            };
+        };
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["DriftBudgetAnswer"];
+                };
+            };
+            /**
+             * @description `malformed-json`: The body is empty, is not well-formed JSON in UTF-8, or its top level is no object.
+             *
+             *     `interrupted-body`: The connection ended, or fewer bytes came than Content-Length announced.
+             */
+            400: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `body-too-large`: The body is larger than the limit that GET /v1/about shows. */
+            413: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `unsupported-media-type`: Content-Type is not application/json (with or without charset=utf-8), or the body is compressed. */
+            415: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where. */
+            422: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    mzCalibration: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** @description Position and width of measured peaks as a line, what each peak pulls, and what to expect between */
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["MzCalibrationRequest"];
+            };
+        };
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MzCalibrationAnswer"];
+                };
+            };
+            /**
+             * @description `malformed-json`: The body is empty, is not well-formed JSON in UTF-8, or its top level is no object.
+             *
+             *     `interrupted-body`: The connection ended, or fewer bytes came than Content-Length announced.
+             */
+            400: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `body-too-large`: The body is larger than the limit that GET /v1/about shows. */
+            413: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `unsupported-media-type`: Content-Type is not application/json (with or without charset=utf-8), or the body is compressed. */
+            415: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where. */
             422: {
                 headers: {
                     "X-Request-Id": components["headers"]["RequestId"];
@@ -2625,7 +3529,7 @@ export interface operations {
                 };
             };
             /**
-             * @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where.
+             * @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.
              *
              *     `too-much-work`: Each part is valid, but together they cost more than one request may.
              */
@@ -2718,7 +3622,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where. */
+            /** @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where. */
             422: {
                 headers: {
                     "X-Request-Id": components["headers"]["RequestId"];
@@ -2809,7 +3713,7 @@ export interface operations {
                 };
             };
             /**
-             * @description `invalid-request`: The body is JSON but breaks the request schema, or a rule between its members. `errors` says where.
+             * @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.
              *
              *     `too-much-work`: Each part is valid, but together they cost more than one request may.
              */

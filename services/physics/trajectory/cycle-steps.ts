@@ -17,6 +17,8 @@ const LONGEST = 0.5;
 export interface PlaneStep {
   readonly cosine: Float64Array;
   readonly sine: Float64Array;
+  /** C, C', S, S' over the whole step. */
+  readonly whole: readonly [number, number, number, number];
 }
 
 /** A stretch of a cycle in which Q keeps its sign. */
@@ -30,7 +32,7 @@ export interface CycleStep {
   readonly y: PlaneStep;
 }
 
-function planeStep(a: number, q: number, phase: number): PlaneStep {
+function planeStep(a: number, q: number, phase: number, length: number): PlaneStep {
   const drive = new Float64Array(DEGREE + 1);
   let factor = 1;
   for (let k = 0; k <= DEGREE; k++) {
@@ -50,7 +52,16 @@ function planeStep(a: number, q: number, phase: number): PlaneStep {
     }
     return w;
   };
-  return { cosine: solution(1, 0), sine: solution(0, 1) };
+  const polynomials = { cosine: solution(1, 0), sine: solution(0, 1) };
+  return {
+    ...polynomials,
+    whole: [
+      valueAt(polynomials, 1, 0, length),
+      slopeAt(polynomials, 1, 0, length),
+      valueAt(polynomials, 0, 1, length),
+      slopeAt(polynomials, 0, 1, length),
+    ],
+  };
 }
 
 /** Where Q changes sign within a cycle that starts at ξ = `phase`, from its start; both planes share these places. */
@@ -86,8 +97,8 @@ export function cycleSteps(a: number, q: number, phase: number, samples: number)
         start: from,
         length,
         sample: part === parts ? sample : null,
-        x: planeStep(a, q, phase + from),
-        y: planeStep(-a, -q, phase + from),
+        x: planeStep(a, q, phase + from, length),
+        y: planeStep(-a, -q, phase + from, length),
       });
     }
     start = at;
@@ -101,14 +112,16 @@ export interface Motion {
   slope: number;
 }
 
+type Polynomials = Pick<PlaneStep, "cosine" | "sine">;
+
 /** Value at `s` into a step of the motion that enters it with `value` and `slope`. */
-export function valueAt({ cosine, sine }: PlaneStep, value: number, slope: number, s: number): number {
+export function valueAt({ cosine, sine }: Polynomials, value: number, slope: number, s: number): number {
   let sum = 0;
   for (let k = DEGREE; k >= 0; k--) sum = sum * s + (value * cosine[k]! + slope * sine[k]!);
   return sum;
 }
 
-export function slopeAt({ cosine, sine }: PlaneStep, value: number, slope: number, s: number): number {
+export function slopeAt({ cosine, sine }: Polynomials, value: number, slope: number, s: number): number {
   let sum = 0;
   for (let k = DEGREE; k >= 1; k--) sum = sum * s + k * (value * cosine[k]! + slope * sine[k]!);
   return sum;

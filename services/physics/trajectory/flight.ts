@@ -78,19 +78,22 @@ function larger(known: Excursion, { peak, peakAt }: PlaneStretch, startCycle: nu
   return peak > known.most ? { most: peak, atCycle: startCycle + peakAt / Math.PI } : known;
 }
 
-/** Carries the ion through a step up to `end` (in ξ); the loss if there is one before that. */
-function advance(course: Course, step: CycleStep, end: number, startCycle: number): Loss | null {
+/** Carries the ion through a step, or up to `end` (in ξ) on it; the loss if there is one before that. */
+function advance(course: Course, step: CycleStep, end: number | null, startCycle: number): Loss | null {
   const inX = { value: course.x, slope: course.slopeX };
   const inY = { value: course.y, slope: course.slopeY };
-  let x = stretchOf(step.x, inX, end, 1);
-  let y = stretchOf(step.y, inY, end, 1);
+  const { length } = step;
+  const mostX = course.excursionX.most;
+  const mostY = course.excursionY.most;
+  let x = stretchOf(step.x, inX, end, length, 1, mostX);
+  let y = stretchOf(step.y, inY, end, length, 1, mostY);
   let loss: Loss | null = null;
   if (x.reached !== null || y.reached !== null) {
     const first = Math.min(x.reached ?? Number.POSITIVE_INFINITY, y.reached ?? Number.POSITIVE_INFINITY);
     const to = x.reached === first ? "x" : "y";
     // Without a limit: what lies beyond the loss no longer counts, and the excursion ends there.
-    x = stretchOf(step.x, inX, first, Number.POSITIVE_INFINITY);
-    y = stretchOf(step.y, inY, first, Number.POSITIVE_INFINITY);
+    x = stretchOf(step.x, inX, first, length, Number.POSITIVE_INFINITY, mostX);
+    y = stretchOf(step.y, inY, first, length, Number.POSITIVE_INFINITY, mostY);
     loss = { to, atCycle: startCycle + first / Math.PI, x: x.value, y: y.value };
   }
   course.excursionX = larger(course.excursionX, x, startCycle);
@@ -101,6 +104,9 @@ function advance(course: Course, step: CycleStep, end: number, startCycle: numbe
   course.slopeY = y.slope;
   return loss;
 }
+
+/** Distance in ξ, a few roundings of a cycle, within which the exit and a sample are one place. */
+const SAME_PLACE = 1e-13;
 
 /**
  * One ion through the ideal field: `rfCycles` cycles with `samplesPerCycle` equally spaced samples each, and one at the
@@ -136,15 +142,15 @@ export function flightThrough(
     const left = (rfCycles - cycle) * Math.PI;
     for (const step of steps) {
       const startCycle = cycle + step.start / Math.PI;
-      const end = Math.min(step.length, left - step.start);
-      if (end > 0) {
-        const loss = advance(course, step, end, startCycle);
+      const rest = left - step.start;
+      if (rest > 0) {
+        const loss = advance(course, step, rest < step.length ? rest : null, startCycle);
         if (loss !== null) {
           sample(course, loss.atCycle);
           return flightOf(course, loss.atCycle, loss);
         }
       }
-      if (step.start + step.length >= left) {
+      if (step.start + step.length >= left - SAME_PLACE) {
         sample(course, rfCycles);
         return flightOf(course, rfCycles, null);
       }
