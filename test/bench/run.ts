@@ -1,11 +1,12 @@
 import { writeFileSync } from "node:fs";
 import type { BenchCase } from "./bench-case.ts";
+import { DRIFT_BUDGET_CASES } from "./drift-budget-cases.ts";
 import { HTTP_CASES } from "./http-cases.ts";
 import { type CaseResult, measure } from "./measure.ts";
 import { PHYSICS_CASES } from "./physics-cases.ts";
 import { caseAsText } from "./print-table.ts";
 
-const CASES: readonly BenchCase[] = [...PHYSICS_CASES, ...HTTP_CASES];
+const CASES: readonly BenchCase[] = [...PHYSICS_CASES, ...DRIFT_BUDGET_CASES, ...HTTP_CASES];
 
 /** Words on the command line choose the cases whose names contain one of them. */
 const wanted = process.argv.slice(2);
