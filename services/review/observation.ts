@@ -15,11 +15,18 @@ interface Judgeable {
   readonly passesIf: () => PassesIf | null;
 }
 
+/** A sentence for a person; where many readings are taken to show one of them, it is written when it is shown. */
+export type Statement = string | (() => string);
+
+export function textOf(statement: Statement): string {
+  return typeof statement === "string" ? statement : statement();
+}
+
 /**
  * What a check has found out, before anybody judges it: a value with its bounds; a physical impossibility, which fails
  * without a value; inputs that are missing; or the reason why the question does not arise.
  */
-export type Reading = { readonly statement: string } & (
+export type Reading = { readonly statement: Statement } & (
   | ({ readonly kind: "value"; readonly value: number } & Judgeable)
   | ({ readonly kind: "impossible" } & Judgeable)
   | { readonly kind: "indeterminate"; readonly missing: readonly string[] }
@@ -104,7 +111,7 @@ export function judge(
     margin: value === null || judged === null ? null : marginOf(value, judged.pass),
     passesIf: outcome === "pass" || judged === null ? null : judged.passesIf(),
     missing: observation.kind === "indeterminate" ? [...new Set(observation.missing)] : [],
-    statement: observation.statement,
+    statement: textOf(observation.statement),
     basis: check.basis,
   };
 }

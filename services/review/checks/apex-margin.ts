@@ -88,7 +88,7 @@ function marginToApex(setting: Filtering, pass: Bounds, caution: Bounds): Readin
       ...judged,
       evidence,
       passesIf,
-      statement:
+      statement: () =>
         `${name} at m/z ${setMz}: U/V is ${digits(Math.abs(value), 4)} ppm ${value < 0 ? "above" : "below"} the apex, where the window closes.` +
         (tolerances?.ratio_ppm === undefined ? " No tolerance of U/V is stated." : "") +
         (window.kind === "window" ? heightNote(window) : ""),

@@ -1,5 +1,6 @@
 import type { Observation } from "../observation.ts";
 import type { Filtering, ResolvedMethod } from "../resolve/resolved-method.ts";
+import { settingsAt } from "./worst-of-stage.ts";
 
 /**
  * One observation for every ion that a filter selects; where `observe` has nothing to say of any ion of a stage, one
@@ -13,13 +14,11 @@ export function eachIon(
   targets: readonly Filtering["target"][] = ["ion"],
 ): Observation[] {
   return method.filters.flatMap((filter) => {
-    const observations = method.acquisitions.flatMap(({ filterings }) =>
-      filterings
-        .filter(
-          (filtering) => filtering.filter.pointer === filter.pointer && targets.includes(filtering.target),
-        )
-        .flatMap((filtering) => observe(filtering) ?? []),
-    );
+    const observations: Observation[] = [];
+    for (const filtering of settingsAt(method, filter)) {
+      const observation = targets.includes(filtering.target) ? observe(filtering) : null;
+      if (observation !== null) observations.push(observation);
+    }
     if (observations.length > 0) return observations;
     return [
       {

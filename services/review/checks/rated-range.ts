@@ -30,7 +30,8 @@ export function ratedRange(method: ResolvedMethod, filter: Placed<MassFilterStag
         pass: GUARANTEED,
         caution: GUARANTEED,
         passesIf: () => null,
-        statement: `m/z ${setMz} lies ${digits(Math.abs(value), 4)} ${value < 0 ? "outside" : "inside"} the nearer end of the range ${rated.mzLow} to ${rated.mzHigh} for which ${name} is rated.`,
+        statement: () =>
+          `m/z ${setMz} lies ${digits(Math.abs(value), 4)} ${value < 0 ? "outside" : "inside"} the nearer end of the range ${rated.mzLow} to ${rated.mzHigh} for which ${name} is rated.`,
       };
     },
     () => passesIfInside(settings, rated, filter.pointer),

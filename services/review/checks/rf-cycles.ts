@@ -53,9 +53,11 @@ function cyclesSquaredOverResolution(setting: Filtering, pass: Bounds, caution: 
     return lacking(`What the RF cycles in ${filter.stage.name} can resolve`, missing);
   }
   const resolution = centreOf(window) / widthOf(window);
+  const value = (cycles.value * cycles.value) / resolution;
+  const seen = cycles.value;
   return {
     kind: "value",
-    value: (cycles.value * cycles.value) / resolution,
+    value,
     evidence: window.evidence === "stated" ? "stated" : "computed",
     pass,
     caution,
@@ -63,8 +65,8 @@ function cyclesSquaredOverResolution(setting: Filtering, pass: Bounds, caution: 
       pass.min === null
         ? null
         : passesIfWithin(cyclesLever(setting), { min: Math.sqrt(pass.min * resolution), max: null }),
-    statement:
-      `${filter.stage.name}: ${digits(cycles.value, 4)} RF cycles of m/z ${mz} give N^2/R ${digits((cycles.value * cycles.value) / resolution, 3)} at set m/z ${setMz}, the lowest of the method.` +
+    statement: () =>
+      `${filter.stage.name}: ${digits(seen, 4)} RF cycles of m/z ${mz} give N^2/R ${digits(value, 3)} at set m/z ${setMz}, the lowest of the method.` +
       heightNote(window),
   };
 }

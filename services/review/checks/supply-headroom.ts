@@ -64,17 +64,37 @@ function filterHeadroom(
   const { supply, rated } = filter.stage;
   // A rated range answers the same question where the amplifier's limits are not known.
   if (supply === undefined && rated !== undefined) return [];
-  const settings = settingsAt(method, filter);
+  const settings = settingsAt(method, filter).map((setting) => ({
+    acquisition: setting.acquisition,
+    ion: setting.ion,
+    demand: filterDemand(setting),
+  }));
   return (["rf", "dc"] as const).map((axis) =>
-    headroom(filter, supply, axis, settings, (setting) => filterDemand(setting, axis), pass, caution),
+    headroom(filter, supply, axis, settings, ({ demand }) => demandOn(axis, demand), pass, caution),
   );
 }
 
-function filterDemand({ window, filter }: Filtering, axis: Axis): Demand {
+/** What a set point asks of both axes, or why it is not known. */
+type SetPointDemand =
+  | {
+      readonly kind: "drive";
+      readonly rfVolts: number;
+      readonly dcVolts: number;
+      readonly evidence: Evidence;
+    }
+  | Exclude<Demand, { kind: "volts" }>;
+
+function demandOn(axis: Axis, demand: SetPointDemand): Demand {
+  if (demand.kind !== "drive") return demand;
+  const { rfVolts, dcVolts, evidence } = demand;
+  return { kind: "volts", volts: axis === "rf" ? rfVolts : dcVolts, evidence };
+}
+
+function filterDemand({ window, filter }: Filtering): SetPointDemand {
   if (window.kind === "unknown") return { kind: "unknown", missing: window.missing };
   if (window.drive !== null) {
     const { rfVolts, dcVolts } = window.drive.volts;
-    return { kind: "volts", volts: axis === "rf" ? rfVolts : Math.max(dcVolts, 0), evidence: "computed" };
+    return { kind: "drive", rfVolts, dcVolts: Math.max(dcVolts, 0), evidence: "computed" };
   }
   if (window.kind === "no-window") return { kind: "none" };
   const { rodSet } = filter.stage;
@@ -86,11 +106,8 @@ function filterDemand({ window, filter }: Filtering, axis: Axis): Demand {
   if (rodSet === undefined || missing.length > 0) return { kind: "unknown", missing };
   const solved = setPointOf(centreOf(window), widthOf(window), fieldOf(rodSet));
   if (solved.kind !== "set-point") return { kind: "unknown", missing: [window.widthPointer] };
-  return {
-    kind: "volts",
-    volts: axis === "rf" ? solved.rfVolts : solved.dcVolts,
-    evidence: window.evidence === "stated" ? "stated" : "computed",
-  };
+  const evidence = window.evidence === "stated" ? "stated" : "computed";
+  return { kind: "drive", rfVolts: solved.rfVolts, dcVolts: solved.dcVolts, evidence };
 }
 
 /** Cells and guides whose supply is stated: RF alone. */
@@ -169,7 +186,7 @@ function headroomOver(
       pass.min === null || pass.min >= 100
         ? null
         : passesIfWithin(lever, { min: volts / (1 - pass.min / 100), max: null }),
-    statement: sentence(digits(statedFor(volts), 5), digits(statedFor(largest), 5)),
+    statement: () => sentence(digits(statedFor(volts), 5), digits(statedFor(largest), 5)),
   };
   if (volts < NO_VOLTS && largest < NO_VOLTS) return notApplicable("No voltage is needed and none is there.");
   if (largest < NO_VOLTS) return { kind: "impossible", ...judged };

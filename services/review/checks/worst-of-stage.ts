@@ -1,4 +1,5 @@
 import type { PassesIf } from "../finding.ts";
+import type { Stage } from "../instrument.ts";
 import { bothPassIf } from "../lever.ts";
 import {
   type About,
@@ -7,6 +8,7 @@ import {
   type Observation,
   outcomeOf,
   type Reading,
+  textOf,
 } from "../observation.ts";
 import type { Filtering, Placed, ResolvedMethod } from "../resolve/resolved-method.ts";
 
@@ -17,13 +19,8 @@ export interface InStage {
 }
 
 /** All that the method sets at one filter. */
-export function settingsAt(
-  { acquisitions }: ResolvedMethod,
-  filter: Placed<Filtering["filter"]["stage"]>,
-): Filtering[] {
-  return acquisitions.flatMap(({ filterings }) =>
-    filterings.filter((filtering) => filtering.filter.pointer === filter.pointer),
-  );
+export function settingsAt({ settings }: ResolvedMethod, filter: Placed<Stage>): readonly Filtering[] {
+  return settings.get(filter.pointer) ?? [];
 }
 
 /**
@@ -62,7 +59,7 @@ export function worstOfStage<Setting extends InStage>(
         ? () => null
         : (passesIf ?? (() => passesForAll(readings.map((each) => each.reading)))),
     statement:
-      reading.statement +
+      textOf(reading.statement) +
       (unknown.length > 0 ? ` Others cannot be judged without ${missing.join(", ")}.` : ""),
   };
 }

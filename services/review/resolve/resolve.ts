@@ -4,7 +4,7 @@ import { Mz } from "../../contract/quantity.ts";
 import type { Width } from "../../contract/width.ts";
 import type { Acquisition } from "../acquisition.ts";
 import type { Instrument, MassFilterStage, Stage } from "../instrument.ts";
-import { leverOn, leverThrough } from "../lever.ts";
+import { leverOn } from "../lever.ts";
 import type { Method } from "../method.ts";
 import { guidesOf } from "./guides.ts";
 import { guidingOf } from "./guiding.ts";
@@ -43,9 +43,22 @@ export function resolveMethod(instrument: Instrument, method: Method): ResolvedM
     stages,
     filters,
     acquisitions,
+    settings: byFilter(acquisitions),
     guides: guidesOf(stages, acquisitions),
     schedule: scheduleOf(method),
   };
+}
+
+function byFilter(acquisitions: readonly ResolvedAcquisition[]): Map<string, Filtering[]> {
+  const settings = new Map<string, Filtering[]>();
+  for (const { filterings } of acquisitions) {
+    for (const filtering of filterings) {
+      const known = settings.get(filtering.filter.pointer);
+      if (known === undefined) settings.set(filtering.filter.pointer, [filtering]);
+      else known.push(filtering);
+    }
+  }
+  return settings;
 }
 
 interface Path {
@@ -199,19 +212,25 @@ function at(
 ): Filtering[] {
   if (filter === null) return [];
   const windowAt = windows.get(filter.pointer)!;
-  return settings.map(({ width, widthPointer, shift, ...setting }) => {
-    const setMz = setting.setMz ?? setting.mz;
-    const claim = width === undefined ? null : { width, pointer: widthPointer };
+  return settings.map((setting) => {
+    const { target, pointer, ion, mz, setMzPointer, shift } = setting;
+    const setMz = setting.setMz ?? mz;
+    const claim =
+      setting.width === undefined ? null : { width: setting.width, pointer: setting.widthPointer };
     return {
-      ...setting,
       acquisition,
       filter,
+      target,
+      pointer,
+      ion,
+      mz,
       setMz,
       setMzStated: setting.setMz !== undefined,
+      setMzPointer,
       claim,
       window: windowAt(setMz, claim),
-      setMzLever: leverThrough(leverOn(setting.setMzPointer, "1", Mz), (mz) => mz - shift)!,
-      windowIfSetTo: (mz) => windowAt(mz, claim),
+      setMzLever: { ...leverOn(setMzPointer, "1", Mz), inputFor: (set) => set - shift },
+      windowIfSetTo: (set) => windowAt(set, claim),
     };
   });
 }

@@ -84,6 +84,8 @@ export interface ResolvedMethod {
   readonly stages: readonly Placed<Stage>[];
   readonly filters: readonly Placed<MassFilterStage>[];
   readonly acquisitions: readonly ResolvedAcquisition[];
+  /** All that the method sets at a filter, by the filter's pointer; a filter at which nothing is set has none. */
+  readonly settings: ReadonlyMap<string, readonly Filtering[]>;
   /** Rod sets that only pass ions, each with the lightest ion it must pass. */
   readonly guides: readonly Guiding[];
   readonly schedule: Schedule;

@@ -42,24 +42,30 @@ export function scheduleOf(method: Method): Schedule {
 
 function momentsOf(method: Method): Moment[] {
   const { acquisition } = method;
-  const boundaries = [
-    ...new Set(
-      acquisition.flatMap(({ retention }) => (retention ? [retention.start_min, retention.end_min] : [])),
-    ),
-  ].sort((one, other) => one - other);
-  if (boundaries.length === 0) return [momentOf(method, null, null, [...acquisition.keys()])];
+  const boundaries = new Set<number>();
+  for (const { retention } of acquisition) {
+    if (retention !== undefined) boundaries.add(retention.start_min).add(retention.end_min);
+  }
+  if (boundaries.size === 0) return [momentOf(method, null, null, [...acquisition.keys()])];
+  const sorted = [...boundaries].sort((one, other) => one - other);
   const moments: Moment[] = [];
-  for (let index = 0; index + 1 < boundaries.length; index++) {
-    const start_min = boundaries[index]!;
-    const end_min = boundaries[index + 1]!;
-    const active = acquisition.flatMap(({ retention }, each) =>
-      retention === undefined || (retention.start_min <= start_min && retention.end_min >= end_min)
-        ? [each]
-        : [],
-    );
-    if (active.length > 0) moments.push(momentOf(method, start_min, end_min, active));
+  for (let index = 0; index + 1 < sorted.length; index++) {
+    const active = activeBetween(acquisition, sorted[index]!, sorted[index + 1]!);
+    if (active.length > 0) moments.push(momentOf(method, sorted[index]!, sorted[index + 1]!, active));
   }
   return moments;
+}
+
+/** Indices of the acquisitions that run all the time between two neighbouring boundaries. */
+function activeBetween(acquisition: Method["acquisition"], start_min: number, end_min: number): number[] {
+  const active: number[] = [];
+  for (let index = 0; index < acquisition.length; index++) {
+    const { retention } = acquisition[index]!;
+    if (retention === undefined || (retention.start_min <= start_min && retention.end_min >= end_min)) {
+      active.push(index);
+    }
+  }
+  return active;
 }
 
 function missingTimes(acquisition: Acquisition, index: number, mode: Method["timing"]["mode"]): string[] {
