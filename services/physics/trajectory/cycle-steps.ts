@@ -8,10 +8,13 @@
  *   (k + 2)(k + 1) w_{k+2} = −a w_k + 2q Σ_j c_j w_{k−j}.
  */
 
-/** Degree of the polynomials. On a step of at most LONGEST both series lose less than a rounding beyond it. */
+/**
+ * Degree of the polynomials. w is entire, but off the real axis it grows as exp(√(q/2) e^|Im ξ|): on steps of half a radian
+ * this degree lost 4e-12 against references, on the longest allowed here nothing above rounding.
+ */
 const DEGREE = 22;
-/** Longest step in ξ, and longest in units of 1/√(|a| + 2|q|). */
-const LONGEST = 0.5;
+/** Longest step in ξ; shorter where √(|a| + 2|q|) exceeds 2. */
+const LONGEST = 0.3;
 
 /** One plane on one step: polynomials in s from 0 to the step's length. */
 export interface PlaneStep {
