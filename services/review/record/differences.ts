@@ -20,16 +20,25 @@ const PROSE = new Set(["statement", "basis", "verdictStatement"]);
 /** Findings whose value is itself a difference of two m/z; on their own scale, rounding alone would tell them apart. */
 const DIFFERENCES_IN_MZ = new Set(["distance-to-edge", "set-against-ion", "width-against-claim"]);
 
+/** Whether members and findings that only the new result has are differences too. */
+export type Additions = "count" | "do-not-count";
+
+interface Comparison {
+  readonly differences: Difference[];
+  readonly additions: Additions;
+}
+
 /** Everything in which a recorded result and the one computed now differ beyond the tolerance. */
-export function differencesOf(recorded: unknown, recomputed: unknown): Difference[] {
+export function differencesOf(recorded: unknown, recomputed: unknown, additions: Additions): Difference[] {
   const differences: Difference[] = [];
+  const comparison: Comparison = { differences, additions };
   const one = membersOf(recorded);
   const other = membersOf(recomputed);
   if (one !== recorded) return [different("/result", recorded, recomputed)];
   const { findings: recordedFindings, ...recordedRest } = one;
   const { findings: recomputedFindings, ...recomputedRest } = other;
-  compareFindings(recordedFindings, recomputedFindings, scaleOfStages(other.settings), differences);
-  compare(recordedRest, recomputedRest, "/result", 0, differences);
+  compareFindings(recordedFindings, recomputedFindings, scaleOfStages(other.settings), comparison);
+  compare(recordedRest, recomputedRest, "/result", 0, comparison);
   return differences;
 }
 
@@ -37,10 +46,10 @@ function compareFindings(
   recorded: unknown,
   recomputed: unknown,
   mzOf: (finding: Members) => number,
-  differences: Difference[],
+  comparison: Comparison,
 ): void {
   if (!Array.isArray(recorded) || !Array.isArray(recomputed)) {
-    differences.push(different("/result/findings", recorded, recomputed));
+    comparison.differences.push(different("/result/findings", recorded, recomputed));
     return;
   }
   const left = new Map<string, unknown[]>();
@@ -53,11 +62,11 @@ function compareFindings(
   recorded.forEach((finding: unknown, index) => {
     const pointer = `/result/findings/${index}`;
     const match = left.get(findingKey(finding))?.shift();
-    if (match === undefined) differences.push(different(pointer, inShort(finding), undefined));
-    else compareFinding(membersOf(finding), membersOf(match), pointer, mzOf, differences);
+    if (match === undefined) comparison.differences.push(different(pointer, inShort(finding), undefined));
+    else compareFinding(membersOf(finding), membersOf(match), pointer, mzOf, comparison);
   });
   for (const finding of [...left.values()].flat()) {
-    differences.push(different("/result/findings/-", undefined, inShort(finding)));
+    comparison.differences.push(different("/result/findings/-", undefined, inShort(finding)));
   }
 }
 
@@ -74,17 +83,17 @@ function compareFinding(
   recomputed: Members,
   pointer: string,
   mzOf: (finding: Members) => number,
-  differences: Difference[],
+  comparison: Comparison,
 ): void {
   const { value, margin, ...rest } = recorded;
   const { value: newValue, margin: newMargin, ...newRest } = recomputed;
   const scale = DIFFERENCES_IN_MZ.has(String(newRest.quantity)) ? mzOf(recomputed) : 0;
-  compare(value, newValue, `${pointer}/value`, scale, differences);
+  compare(value, newValue, `${pointer}/value`, scale, comparison);
   // A margin is value less bound: it is known as well as the larger of these two, however small it is itself.
   const { min, max } = membersOf(newRest.pass);
   const marginScale = Math.max(scale, magnitude(newValue), magnitude(min), magnitude(max));
-  compare(margin, newMargin, `${pointer}/margin`, marginScale, differences);
-  compare(rest, newRest, pointer, 0, differences);
+  compare(margin, newMargin, `${pointer}/margin`, marginScale, comparison);
+  compare(rest, newRest, pointer, 0, comparison);
 }
 
 const magnitude = (value: unknown): number => (typeof value === "number" ? Math.abs(value) : 0);
@@ -106,22 +115,24 @@ function compare(
   recomputed: unknown,
   pointer: string,
   scale: number,
-  differences: Difference[],
+  comparison: Comparison,
 ): void {
   if (typeof recorded === "number" && typeof recomputed === "number") {
-    if (!agree(recorded, recomputed, scale)) differences.push(different(pointer, recorded, recomputed));
+    if (!agree(recorded, recomputed, scale))
+      comparison.differences.push(different(pointer, recorded, recomputed));
   } else if (
     isObject(recorded) &&
     isObject(recomputed) &&
     Array.isArray(recorded) === Array.isArray(recomputed)
   ) {
-    for (const name of new Set([...Object.keys(recorded), ...Object.keys(recomputed)])) {
+    const added = Array.isArray(recorded) || comparison.additions === "count" ? Object.keys(recomputed) : [];
+    for (const name of new Set([...Object.keys(recorded), ...added])) {
       if (PROSE.has(name)) continue;
       const at = `${pointer}/${name.replaceAll("~", "~0").replaceAll("/", "~1")}`;
-      compare(ownMember(recorded, name), ownMember(recomputed, name), at, 0, differences);
+      compare(ownMember(recorded, name), ownMember(recomputed, name), at, 0, comparison);
     }
   } else if (recorded !== recomputed) {
-    differences.push(different(pointer, recorded, recomputed));
+    comparison.differences.push(different(pointer, recorded, recomputed));
   }
 }
 

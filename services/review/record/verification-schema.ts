@@ -58,11 +58,15 @@ export const VerificationAnswer = z
     keyId: z.string().nullable().meta({ description: "RFC 7638 thumbprint of the key that the seal names." }),
     reproduced: z.boolean().meta({
       description:
-        "Whether this version finds the same from the same input: every number within the tolerance, everything else but sentences exactly.",
+        "Whether this version finds the same from the same input: every number within the tolerance, everything else but sentences exactly. Where another version made the record, checks and members that it did not have are left out.",
     }),
     notReproducedBecause: NotReproduced.nullable(),
     differences: z.array(RecordDifference).max(MOST_DIFFERENCES),
     differencesOmitted: z.int().min(0),
+    checksAdded: z.array(z.string()).meta({
+      description:
+        "Checks that this version has and the one that made the record had not. They count in verdict and not in reproduced.",
+    }),
     tolerance: z.number().meta({
       description:
         "Relative to the larger of two numbers. A margin is measured on the scale of the value and the bounds it is the difference of, a difference of two m/z on that of the m/z.",

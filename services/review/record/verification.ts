@@ -1,3 +1,4 @@
+import { listed } from "../statement.ts";
 import { TOLERANCE } from "./agreement.ts";
 import { integrityOf } from "./integrity.ts";
 import { type KeptRecord, membersOf } from "./kept-record.ts";
@@ -16,7 +17,11 @@ type Unsealed = Omit<VerificationAnswer, keyof SealFinding | "statement">;
 /** Everything a verification finds out without a key. */
 export function verifyContent({ record, criteria }: VerificationRequest, engine: Engine): Unsealed {
   const { altered, recordDigest } = integrityOf(record);
-  const { because, differences, verdict, verdictByCriteria } = reproductionOf(record, criteria);
+  const { because, differences, checksAdded, verdict, verdictByCriteria } = reproductionOf(
+    record,
+    criteria,
+    engine,
+  );
   return {
     intact: altered.length === 0,
     altered: [...altered],
@@ -25,6 +30,7 @@ export function verifyContent({ record, criteria }: VerificationRequest, engine:
     notReproducedBecause: because,
     differences: differences.slice(0, MOST_DIFFERENCES).map((difference) => ({ ...difference })),
     differencesOmitted: Math.max(0, differences.length - MOST_DIFFERENCES),
+    checksAdded: [...checksAdded],
     tolerance: TOLERANCE,
     verdict,
     verdictByCriteria,
@@ -68,10 +74,17 @@ export function inWords(content: Unsealed, seal: SealFinding): VerificationAnswe
   return { statement: sentences.join(" "), ...content, ...seal };
 }
 
-function reproductionInWords({ notReproducedBecause, differences, differencesOmitted }: Unsealed): string {
+function reproductionInWords({
+  notReproducedBecause,
+  differences,
+  differencesOmitted,
+  checksAdded,
+}: Unsealed): string {
   switch (notReproducedBecause) {
     case null:
-      return "This version finds the same from the same input.";
+      return checksAdded.length === 0
+        ? "This version finds the same from the same input."
+        : `This version finds the same from the same input; it has checks that the record's did not: ${listed(checksAdded)}.`;
     case "unknown-format":
       return "This version does not know the layout of the record, so nothing was recomputed.";
     case "input-refused":

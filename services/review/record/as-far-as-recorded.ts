@@ -1,0 +1,41 @@
+import { type Outcome, worstOutcome } from "../finding.ts";
+import type { SignOffResult } from "../sign-off-schema.ts";
+import { membersOf } from "./kept-record.ts";
+
+/**
+ * What of a result an older record can be held to: a later version may have added checks, and a record cannot fail to
+ * reproduce what it never stated. Counts and verdict are taken over the findings that remain.
+ */
+export function asFarAsRecorded(
+  recorded: unknown,
+  result: SignOffResult,
+): { readonly result: SignOffResult; readonly checksAdded: readonly string[] } {
+  const { findings } = membersOf(recorded);
+  const known = new Set(Array.isArray(findings) ? findings.map((finding) => membersOf(finding).check) : []);
+  const checksAdded = [...new Set(result.findings.map(({ check }) => check))].filter(
+    (check) => !known.has(check),
+  );
+  if (checksAdded.length === 0) return { result, checksAdded };
+  const remaining = result.findings.filter(({ check }) => known.has(check));
+  const counts: Record<Outcome, number> = {
+    pass: 0,
+    caution: 0,
+    fail: 0,
+    indeterminate: 0,
+    "not-applicable": 0,
+  };
+  for (const { outcome } of remaining) counts[outcome]++;
+  return {
+    checksAdded,
+    result: {
+      ...result,
+      findings: remaining,
+      outcomeCounts: counts,
+      verdict:
+        worstOutcome(remaining.filter(({ required }) => required).map(({ outcome }) => outcome)) ??
+        "indeterminate",
+      notShown: result.notShown.filter(({ check }) => known.has(check)),
+      waivers: result.waivers.filter(({ check }) => known.has(check)),
+    },
+  };
+}
