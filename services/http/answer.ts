@@ -38,8 +38,8 @@ function accept(endpoint: AnyEndpoint, document: unknown): unknown {
 }
 
 /**
- * Admitted work is a few milliseconds at most, so that liveness can share the event loop with it. Work above that
- * belongs on a worker.
+ * What is admitted is computed on the event loop, which liveness shares: a few milliseconds for every question but the
+ * largest sign-offs, whose 2,000 acquisitions keep it for some tenths of a second. Heavier work belongs on a worker.
  */
 function refuseTooMuchWork({ work }: AnyEndpoint, request: unknown): void {
   if (work === null) return;
