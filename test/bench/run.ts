@@ -5,8 +5,18 @@ import { HTTP_CASES } from "./http-cases.ts";
 import { type CaseResult, measure } from "./measure.ts";
 import { PHYSICS_CASES } from "./physics-cases.ts";
 import { caseAsText } from "./print-table.ts";
+import { REGIONS_CASES } from "./regions-cases.ts";
+import { REVIEW_CASES } from "./review-cases.ts";
+import { TRANSMISSION_CASES } from "./transmission-cases.ts";
 
-const CASES: readonly BenchCase[] = [...PHYSICS_CASES, ...DRIFT_BUDGET_CASES, ...HTTP_CASES];
+const CASES: readonly BenchCase[] = [
+  ...PHYSICS_CASES,
+  ...REGIONS_CASES,
+  ...DRIFT_BUDGET_CASES,
+  ...TRANSMISSION_CASES,
+  ...REVIEW_CASES,
+  ...HTTP_CASES,
+];
 
 /** Words on the command line choose the cases whose names contain one of them. */
 const wanted = process.argv.slice(2);
