@@ -43,7 +43,7 @@ describe("the demo", () => {
   it("finds the one product that the cell loses, and from which cutoff on it would not", () => {
     expect(section("Fail")).toBe(` (1)
   SDZ-2 in q2: product-above-cutoff
-    m/z 65.0386 is below the cutoff: the ion is lost there (cutoff m/z 70) in q2.
+    m/z 65.0386 is below the cutoff of q2, m/z 70: the ion is lost there.
     Passes if /instrument/stages/1/rf/mz is at most 54.1988.`);
   });
 

@@ -73,12 +73,14 @@ function overCutoff(guiding: Guiding, pass: Bounds, caution: Bounds): Reading {
     return { kind: "impossible", ...judged, statement: `${name} has no RF voltage: no ion is confined.` };
   }
   const value = product.mz / cutoffMz;
-  const place =
-    value < 1 ? "below the cutoff: the ion is lost there" : `${digits(value, 4)} times the cutoff`;
+  const cutoff = `the cutoff of ${name}, m/z ${digits(cutoffMz, 5)}`;
   return {
     kind: "value",
     value,
     ...judged,
-    statement: `m/z ${product.mz} is ${place} (cutoff m/z ${digits(cutoffMz, 5)}) in ${name}.`,
+    statement:
+      value < 1
+        ? `m/z ${product.mz} is below ${cutoff}: the ion is lost there.`
+        : `m/z ${product.mz} is ${digits(value, 4)} times ${cutoff}.`,
   };
 }
