@@ -12,6 +12,11 @@ export function referenceTo(schema: z.ZodType): { $ref: string } {
   return { $ref: `${IN_DOCUMENT}${idOf(schema)}` };
 }
 
+/** The JSON Schema of one named shape. */
+export function componentOf(root: z.ZodType, side: Side): JsonSchema {
+  return componentsOf([[root, side]]).get(idOf(root))!;
+}
+
 /**
  * The JSON Schemas of all named shapes reachable from `roots`, by name. Two shapes under one name, or one shape that
  * requests and answers would describe differently, are an error: a reader could not tell which one is meant.

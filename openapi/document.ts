@@ -6,7 +6,7 @@ import { Problem } from "../services/http/problem-document.ts";
 import { PROBLEMS, type ProblemCode } from "../services/http/problems.ts";
 import { TAGS } from "../services/http/tags.ts";
 import { VERSION } from "../services/http/version.ts";
-import { componentsOf, referenceTo, type Side } from "./components.ts";
+import { componentOf, componentsOf, referenceTo, type Side } from "./components.ts";
 
 const DESCRIPTION = [
   "Rodset shows on paper, before a quadrupole mass-spectrometry method is signed off, that the mass-filter settings can do what the method claims.",
@@ -43,7 +43,9 @@ export function openApiDocument(endpoints: readonly AnyEndpoint[]) {
 
 function rootsOf(endpoints: readonly AnyEndpoint[]): (readonly [z.ZodType, Side])[] {
   return [
-    ...endpoints.flatMap(({ request }) => (request === null ? [] : [[request, "input"] as const])),
+    ...endpoints.flatMap(({ request, method }) =>
+      request === null || method === "get" ? [] : [[request, "input"] as const],
+    ),
     ...endpoints.map(({ answer }) => [answer, "output"] as const),
     [Problem, "output"],
   ];
@@ -58,13 +60,13 @@ function pathOf(endpoint: AnyEndpoint): RouteConfig {
     tags: [tag],
     summary,
     description,
-    ...(request === null ? null : { request: { body: requestBodyOf(endpoint) } }),
+    ...(request === null ? null : method === "get" ? queryOf(request) : bodyOf(endpoint)),
     responses: { 200: answerOf(endpoint), ...problemResponses(problemsOf(endpoint)) },
   };
 }
 
-function requestBodyOf({ request, summary, examples }: AnyEndpoint) {
-  return {
+function bodyOf({ request, summary, examples }: AnyEndpoint) {
+  const body = {
     required: true,
     description: summary,
     content: {
@@ -74,6 +76,17 @@ function requestBodyOf({ request, summary, examples }: AnyEndpoint) {
       },
     },
   };
+  return { request: { body } };
+}
+
+/** Each member of the request schema of a GET is a parameter of its query. */
+function queryOf(request: z.ZodType): Pick<RouteConfig, "parameters"> {
+  const { properties = {}, required = [] } = componentOf(request, "input");
+  const parameters = Object.entries(properties).map(([name, schema]) => {
+    const { description, ...described } = schema as { description: string };
+    return { name, in: "query" as const, required: required.includes(name), description, schema: described };
+  });
+  return { parameters };
 }
 
 function answerOf({ answer, forms, examples }: AnyEndpoint) {

@@ -11,21 +11,27 @@ interface Operation {
   readonly operationId?: string;
   readonly summary?: string;
   readonly requestBody?: unknown;
+  readonly parameters?: readonly unknown[];
 }
 
-/** What the client needs of each operation at run time: method, path, and whether it takes a body. */
+/** What the client needs of each operation at run time: method, path, and how it takes its request. */
 export function sdkOperations(document: unknown): string {
   const { paths } = document as { paths: Record<string, Record<string, Operation>> };
   const entries = Object.entries(paths).flatMap(([path, methods]) =>
-    Object.entries(methods).flatMap(([method, { operationId, summary, requestBody }]) =>
+    Object.entries(methods).flatMap(([method, { operationId, summary, requestBody, parameters = [] }]) =>
       operationId === undefined
         ? []
         : [
             // An editor shows this sentence at the client's method.
             `  /** ${summary}: \`${method.toUpperCase()} ${path}\` */`,
-            `  ${operationId}: { method: ${JSON.stringify(method.toUpperCase())}, path: ${JSON.stringify(path)}, takesBody: ${requestBody !== undefined} },`,
+            `  ${operationId}: { method: ${JSON.stringify(method.toUpperCase())}, path: ${JSON.stringify(path)}, takes: ${JSON.stringify(takes(requestBody, parameters))} },`,
           ],
     ),
   );
   return `${NOTICE}export const OPERATIONS = {\n${entries.join("\n")}\n} as const;\n`;
+}
+
+function takes(requestBody: unknown, parameters: readonly unknown[]): "body" | "query" | "nothing" {
+  if (requestBody !== undefined) return "body";
+  return parameters.length > 0 ? "query" : "nothing";
 }

@@ -5,12 +5,12 @@ import type { operations } from "./generated/schema.ts";
 /** Name of a question the service answers. */
 export type OperationId = keyof typeof OPERATIONS;
 
-/** What an operation takes; never where it takes nothing. */
+/** What an operation takes, as a body or as a query; never where it takes nothing. */
 export type RequestOf<Id extends OperationId> = operations[Id] extends {
   requestBody: { content: { "application/json": infer Request } };
 }
   ? Request
-  : never;
+  : NonNullable<operations[Id]["parameters"]["query"]>;
 
 /** What an operation answers. */
 export type AnswerOf<Id extends OperationId> = operations[Id] extends {
@@ -49,9 +49,15 @@ export function createClient(options: ClientOptions): Client {
   new Headers(options.headers);
 
   const call = (id: OperationId, mediaType: string, args: readonly unknown[]): Promise<string> => {
-    const { method, path, takesBody } = OPERATIONS[id];
-    const [body, callOptions] = takesBody ? args : [undefined, args[0]];
-    return exchange(options, { ...(callOptions as CallOptions | undefined), method, path, body, mediaType });
+    const { method, path, takes } = OPERATIONS[id];
+    const [request, callOptions] = takes === "nothing" ? [undefined, args[0]] : args;
+    return exchange(options, {
+      ...(callOptions as CallOptions | undefined),
+      method,
+      path: takes === "query" ? path + queryOf(request) : path,
+      body: takes === "body" ? request : undefined,
+      mediaType,
+    });
   };
   const methods = (Object.keys(OPERATIONS) as OperationId[]).map((id) => [
     id,
@@ -59,4 +65,10 @@ export function createClient(options: ClientOptions): Client {
   ]);
   const form: Client["form"] = (id, mediaType, ...args) => call(id, mediaType, args);
   return { ...Object.fromEntries(methods), form };
+}
+
+function queryOf(request: unknown): string {
+  const stated = Object.entries(request ?? {}).filter(([, value]) => value !== undefined);
+  const query = new URLSearchParams(stated.map(([name, value]): [string, string] => [name, String(value)]));
+  return stated.length === 0 ? "" : `?${query}`;
 }

@@ -6,6 +6,7 @@ import { logDefect } from "./defect.ts";
 import type { AnyEndpoint, Limits, Sealing } from "./endpoint.ts";
 import { ProblemError, problemDocument } from "./problem-document.ts";
 import { PROBLEMS } from "./problems.ts";
+import { queryDocument } from "./query-document.ts";
 import { reply, replyEmpty, travelOf } from "./reply.ts";
 import { jsonBody, problemOfBodyError } from "./request-body.ts";
 
@@ -64,7 +65,8 @@ function mount(
   for (const endpoint of endpoints) {
     const { request, bodyLimit_kB = 0, refusesDuplicateMembers = false } = endpoint;
     const limit_kB = Math.max(limits.bodyLimit_kB, bodyLimit_kB);
-    const body = request === null ? [] : jsonBody(limit_kB, { refusesDuplicateMembers });
+    const takesBody = request !== null && endpoint.method === "post";
+    const body = takesBody ? jsonBody(limit_kB, { refusesDuplicateMembers }) : [];
     app[endpoint.method](path, entered(endpoint), ...body, question(endpoint, limits, sealing));
   }
   app.all(path, otherMethods(endpoints.map(({ method }) => method)));
@@ -83,9 +85,10 @@ function question(endpoint: AnyEndpoint, limits: Limits, sealing: Sealing): Requ
   const written = new Map<string, WrittenAnswer>();
   return async (request, response) => {
     const form = formFor(endpoint, request);
+    const document = endpoint.method === "get" ? queryDocument(endpoint, request.url) : request.body;
     const answer =
-      written.get(form) ?? write(endpoint, await answerOf(endpoint, request.body, limits, sealing), form);
-    if (endpoint.method === "get") written.set(form, answer);
+      written.get(form) ?? write(endpoint, await answerOf(endpoint, document, limits, sealing), form);
+    if (endpoint.method === "get" && endpoint.request === null) written.set(form, answer);
     reply(response, 200, answer.mediaType, answer.body, vary);
   };
 }

@@ -57,7 +57,10 @@ export interface Endpoint<Request extends RequestSchema, Answer extends z.ZodTyp
   readonly tag: Tag;
   readonly summary: string;
   readonly description: string;
-  /** null for an endpoint that takes nothing: its answer never changes while the service runs. */
+  /**
+   * A POST takes it as its body, a GET as its query, in which nothing confidential may stand. null for an endpoint that
+   * takes nothing.
+   */
   readonly request: Request;
   /** What the request schema cannot say, checked after it. */
   readonly rules?: readonly Rule<Accepted<Request>>[];
@@ -99,7 +102,7 @@ export function problemsOf(endpoint: AnyEndpoint): ProblemCode[] {
     "invalid-request",
   ];
   return [
-    ...(endpoint.request === null ? [] : ofBody),
+    ...(endpoint.request === null ? [] : endpoint.method === "get" ? (["invalid-request"] as const) : ofBody),
     ...(endpoint.work === null ? [] : (["too-much-work"] as const)),
     "not-acceptable",
     ...(endpoint.problems ?? []),

@@ -15,12 +15,14 @@ import { signOffChecks } from "./endpoints/sign-off-checks.ts";
 import { signOffComparison } from "./endpoints/sign-off-comparison.ts";
 import { signOffVerification } from "./endpoints/sign-off-verification.ts";
 import { stability } from "./endpoints/stability.ts";
+import { stabilityRegions } from "./endpoints/stability-regions.ts";
 import { trajectory } from "./endpoints/trajectory.ts";
 import { transit } from "./endpoints/transit.ts";
 
 /** Every question the service answers, in the order of the document. */
 export const ENDPOINTS: readonly AnyEndpoint[] = [
   stability,
+  stabilityRegions,
   mathieuParameters,
   rfOnly,
   transit,

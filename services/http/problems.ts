@@ -48,7 +48,7 @@ export const PROBLEMS = {
   "invalid-request": {
     status: 422,
     title: "The request has members that are missing, unknown or wrong",
-    when: "The body is JSON but breaks the request schema, or a rule between its members. `errors` says where.",
+    when: "The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.",
     remedy: "Correct the members that `errors` points at. The codes are listed at GET /problems.",
   },
   "too-much-work": {

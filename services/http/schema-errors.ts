@@ -9,7 +9,7 @@ import { isMissing, issuesOfNearestArms, memberOf } from "./nearest-arm.ts";
 type Issue = z.core.$ZodIssue;
 
 /** A longer name in a pointer would hand the caller's payload back; the pointer then leads to the object around it. */
-const LONGEST_NAME_SHOWN = 60;
+export const LONGEST_NAME_SHOWN = 60;
 
 export type Checked<Accepted> =
   | { readonly accepted: Accepted; readonly errors: null }

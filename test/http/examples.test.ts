@@ -21,7 +21,9 @@ describe.each(ENDPOINTS.map((endpoint) => ({ ...endpoint, name: endpoint.operati
     it.each(examples)("answers %s as documented", async (_name, example) => {
       const asked =
         endpoint.method === "get"
-          ? request(app).get(endpoint.path)
+          ? request(app)
+              .get(endpoint.path)
+              .query(example.request as object)
           : request(app)
               .post(endpoint.path)
               .send(example.request as object);

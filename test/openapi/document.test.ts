@@ -65,6 +65,25 @@ describe("the document", () => {
     },
   );
 
+  it("describes every parameter of a query, with its range, and of nothing else", () => {
+    for (const { path, method, request } of ENDPOINTS) {
+      const parameters = (document.paths?.[path]?.[method]?.parameters ?? []) as {
+        name: string;
+        in: string;
+        description: string;
+        schema: { minimum: number; maximum: number };
+      }[];
+      const names = method === "get" && request !== null ? Object.keys(request.shape) : [];
+      expect(parameters.map(({ name }) => name)).toEqual(names);
+      for (const { in: place, description, schema } of parameters) {
+        expect(place).toBe("query");
+        expect(description).toMatch(/when absent\.$/);
+        expect(schema.minimum).toBeLessThan(schema.maximum);
+      }
+    }
+    expect(document.paths?.["/v1/stability-regions"]?.get?.parameters).toHaveLength(5);
+  });
+
   it("has each operation id and each path with its method once", () => {
     expect(new Set(ENDPOINTS.map(({ operationId }) => operationId)).size).toBe(ENDPOINTS.length);
     expect(new Set(ENDPOINTS.map(({ method, path }) => `${method} ${path}`)).size).toBe(ENDPOINTS.length);

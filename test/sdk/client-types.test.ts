@@ -35,6 +35,7 @@ describe("the client's types", () => {
 
   it("know which media types an answer has beside JSON", () => {
     expectTypeOf<FormOf<"signOffChecks">>().toEqualTypeOf<"text/markdown">();
+    expectTypeOf<FormOf<"stabilityRegions">>().toEqualTypeOf<"image/svg+xml">();
     expectTypeOf<FormOf<"passband">>().toBeNever();
   });
 
@@ -52,6 +53,9 @@ describe("the client's types", () => {
       await client.passband();
       // @ts-expect-error an operation that takes nothing
       await client.about({ rodSet });
+      await client.stabilityRegions({ aMin: 0, qMax: 1 });
+      // @ts-expect-error a misspelt parameter of a query
+      await client.stabilityRegions({ aLow: 0 });
       // @ts-expect-error there is no such operation
       await client.passbands({ rodSet, drive: { rf } });
       // @ts-expect-error a media type that the operation does not answer in

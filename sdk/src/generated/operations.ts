@@ -2,6 +2,8 @@
 export const OPERATIONS = {
   /** Whether ions or points (a, q) are stable, and which rods take them if not: `POST /v1/stability` */
   stability: { method: "POST", path: "/v1/stability", takes: "body" },
+  /** Corners and boundary curves of the stability regions; also as a diagram: `GET /v1/stability-regions` */
+  stabilityRegions: { method: "GET", path: "/v1/stability-regions", takes: "query" },
   /** a and q of an ion, and every quantity that follows from them: `POST /v1/mathieu-parameters` */
   mathieuParameters: { method: "POST", path: "/v1/mathieu-parameters", takes: "body" },
   /** Which ions an RF-only rod set guides, and how firmly: `POST /v1/rf-only` */

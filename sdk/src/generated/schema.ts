@@ -20,6 +20,26 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/v1/stability-regions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * Corners and boundary curves of the stability regions; also as a diagram
+         * @description The regions of the ideal mass filter under a sinusoid, in a box of (a, q). Region (n_x, n_y) is where a_{n_x}(q) < a < b_{n_x+1}(q) and a_{n_y}(q) < −a < b_{n_y+1}(q). Accept: image/svg+xml answers as a diagram to print.
+         */
+        get: operations["stabilityRegions"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/v1/mathieu-parameters": {
         parameters: {
             query?: never;
@@ -425,8 +445,21 @@ export interface components {
         BeamByEnergy: {
             /** @description Position in x and in y at the entrance, standard deviation in mm. */
             sigma_mm: number;
-            /** @description Mean radial energy of both axes, in eV per charge. */
+            /** @description Mean radial energy of both axes together, in eV per charge; each ion has the velocities that belong to its own m/z. */
             meanRadialEnergy_eVPerCharge: number;
+        };
+        /** @description A whole region, whatever the box cuts off it. */
+        BoundedRegion: {
+            region: components["schemas"]["Region"];
+            /** @description inner: nearest the origin, where a window is widest. highTip and lowTip: largest and smallest U/V, where it closes. outer: the fourth. */
+            corners: {
+                inner: components["schemas"]["RegionCorner"];
+                highTip: components["schemas"]["RegionCorner"];
+                outer: components["schemas"]["RegionCorner"];
+                lowTip: components["schemas"]["RegionCorner"];
+            };
+            /** @description The four sides, following each other around the region. */
+            arcs: components["schemas"]["RegionArc"][];
         };
         /** @description A closed interval; null is unbounded on that side. */
         Bounds: {
@@ -1703,6 +1736,30 @@ export interface components {
             y: number;
             name: components["schemas"]["RegionName"] | null;
         };
+        /** @description One side of a region, from corner to corner. */
+        RegionArc: {
+            /** @description The curve in the notation of DLMF 28.2, such as a = b_1(q). */
+            curve: string;
+            /**
+             * @description The rods that take an ion beyond this side.
+             * @enum {string}
+             */
+            lostTo: "x" | "y";
+            /** @description β of that plane on the curve. */
+            characteristicExponent: number;
+            points: {
+                q: number;
+                a: number;
+            }[];
+            /** @description How far, in a, the curve departs from straight lines through the points. */
+            chordError: number;
+        };
+        RegionCorner: {
+            a: number;
+            q: number;
+            /** @description U/V of the scan line through the corner. */
+            dcToRfRatio: number;
+        };
         /**
          * @description A stability region by its bands (n_x, n_y): first (0,0), second (1,1), third (1,0).
          * @enum {string}
@@ -2126,6 +2183,18 @@ export interface components {
                 q: number;
             }[];
         };
+        StabilityRegionsAnswer: {
+            box: {
+                aMin: number;
+                aMax: number;
+                qMin: number;
+                qMax: number;
+            };
+            /** @description Those of which some part lies inside the box. */
+            regions: components["schemas"]["BoundedRegion"][];
+            /** @description outside-computed-domain: the box reaches beyond |a| or q = 12, where further regions are not listed. POST /v1/stability judges single points there. */
+            reason: "outside-computed-domain" | null;
+        };
         StabilityRequest: components["schemas"]["StabilityOfIons"] | components["schemas"]["StabilityOfPoints"];
         StabilityResult: {
             /** @description null for a point. */
@@ -2431,11 +2500,13 @@ export interface components {
             sealedAt: string | null;
             /** @description RFC 7638 thumbprint of the key that the seal names. */
             keyId: string | null;
-            /** @description Whether this version finds the same from the same input: every number within the tolerance, everything else but sentences exactly. */
+            /** @description Whether this version finds the same from the same input: every number within the tolerance, everything else but sentences exactly. Where another version made the record, checks and members that it did not have are left out. */
             reproduced: boolean;
             notReproducedBecause: components["schemas"]["NotReproduced"] | null;
             differences: components["schemas"]["RecordDifference"][];
             differencesOmitted: number;
+            /** @description Checks that this version has and the one that made the record had not. They count in verdict and not in reproduced. */
+            checksAdded: string[];
             /** @description Relative to the larger of two numbers. A margin is measured on the scale of the value and the bounds it is the difference of, a difference of two m/z on that of the m/z. */
             tolerance: number;
             /** @description Verdict that this version comes to by the criteria on record; null where it can come to none. */
@@ -2603,6 +2674,69 @@ export interface operations {
              *
              *     `too-much-work`: Each part is valid, but together they cost more than one request may.
              */
+            422: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    stabilityRegions: {
+        parameters: {
+            query?: {
+                /** @description Lower edge of the box in a; -12 when absent. */
+                aMin?: number;
+                /** @description Upper edge of the box in a, above aMin; 12 when absent. */
+                aMax?: number;
+                /** @description Left edge of the box in q; 0 when absent. */
+                qMin?: number;
+                /** @description Right edge of the box in q, above qMin; 12 when absent. */
+                qMax?: number;
+                /** @description Points on each side of a region, both corners included; 33 when absent. */
+                pointsPerArc?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StabilityRegionsAnswer"];
+                    "image/svg+xml": string;
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where. */
             422: {
                 headers: {
                     "X-Request-Id": components["headers"]["RequestId"];
