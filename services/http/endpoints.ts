@@ -4,6 +4,7 @@ import { driftBudget } from "./endpoints/drift-budget.ts";
 import { mathieuParameters } from "./endpoints/mathieu-parameters.ts";
 import { mzCalibration } from "./endpoints/mz-calibration.ts";
 import { passband } from "./endpoints/passband.ts";
+import { peakProfile } from "./endpoints/peak-profile.ts";
 import { problems } from "./endpoints/problems.ts";
 import { rfOnly } from "./endpoints/rf-only.ts";
 import { scanTable } from "./endpoints/scan-table.ts";
@@ -29,6 +30,7 @@ export const ENDPOINTS: readonly AnyEndpoint[] = [
   trajectory,
   passband,
   setPoints,
+  peakProfile,
   scanTable,
   driftBudget,
   mzCalibration,

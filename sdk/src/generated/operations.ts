@@ -16,6 +16,8 @@ export const OPERATIONS = {
   passband: { method: "POST", path: "/v1/passband", takes: "body" },
   /** The RF and DC, or the frequency, that give passbands of wanted position and width: `POST /v1/set-points` */
   setPoints: { method: "POST", path: "/v1/set-points", takes: "body" },
+  /** The share of a beam that passes against m/z, and position, height and widths of the peak: `POST /v1/peak-profile` */
+  peakProfile: { method: "POST", path: "/v1/peak-profile", takes: "body" },
   /** Set points over a range, the straight line in their place, and the fastest scan: `POST /v1/scan-table` */
   scanTable: { method: "POST", path: "/v1/scan-table", takes: "body" },
   /** What tolerances do to a window, what they may be, and when to tune again: `POST /v1/drift-budget` */

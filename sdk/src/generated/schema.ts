@@ -160,6 +160,26 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/v1/peak-profile": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * The share of a beam that passes against m/z, and position, height and widths of the peak
+         * @description Transmission of an ideal quadrupole field with a hard aperture at r0, for a centred Gaussian beam and a residence. Deterministic: for each start phase of the RF the states that survive form polygons, whose measure is computed, and the mean over the phase is taken; the answer states the error bound that was reached. Widths at half and at a tenth of the height are those of this peak and differ from the distance of the stability edges. Not modelled: fringe fields, round rods, collisions, space charge, the exit and a beam off the axis, so that real peaks have tails that this one lacks. One request may ask for 35000 RF cycles of work: (number of points, and 50 more for the peak) times (RF cycles, 2-fold with a scan rate, plus 4/√accuracy, up to three times that for flights of a few cycles).
+         */
+        post: operations["peakProfile"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/v1/scan-table": {
         parameters: {
             query?: never;
@@ -1330,6 +1350,18 @@ export interface components {
             /** @description Needed where a peak states its drive. */
             frequency_MHz?: number;
         };
+        /** @description Equally spaced m/z, both ends among them. */
+        MzRange: {
+            /** @description Mass-to-charge ratio m/z of the ion, dimensionless. */
+            from: number;
+            /** @description Mass-to-charge ratio m/z of the ion, dimensionless. */
+            to: number;
+            points: number;
+        };
+        /** @description These m/z, in this order. */
+        MzValues: {
+            values: number[];
+        };
         Neighbour: {
             ion: components["schemas"]["Ion"];
             /** @description Response of the neighbour as a fraction of the target's. */
@@ -1520,6 +1552,37 @@ export interface components {
             pass?: components["schemas"]["LowerLimit"];
             caution?: components["schemas"]["LowerLimit"];
         };
+        /** @description Position, height and widths of the peak of the first stability region. */
+        Peak: {
+            /** @description m/z of the largest transmission; on a flat top any point of it. */
+            mz: number;
+            /** @description The height of the peak. */
+            transmission: number;
+            /** @description Width at half height, in m/z; null where a flank does not come down to it. */
+            widthHalfHeight: number | null;
+            /** @description Width at a tenth of the height, in m/z; null where a flank does not come down to it. */
+            widthTenthHeight: number | null;
+            halfHeight: components["schemas"]["PeakFlanks"] | null;
+            tenthHeight: components["schemas"]["PeakFlanks"] | null;
+            /** @description The stability edges, between which the window lies whatever the beam. */
+            edges: {
+                mzLow: number;
+                mzHigh: number;
+                mzCentre: number;
+                width: number;
+            };
+            /** @description m/z of the largest transmission minus the edges' centre. */
+            shiftFromCentre: number;
+            /** @description Largest absolute error of the transmissions from which the peak was found. */
+            errorBound: number;
+        };
+        /** @description Where the peak has fallen to a share of its height. */
+        PeakFlanks: {
+            mzLow: number;
+            mzHigh: number;
+            /** @description Middle of both flanks minus the edges' centre, in m/z. */
+            shiftFromCentre: number;
+        };
         PeakInfluence: {
             /** @description Index in the request's peaks. */
             peak: number;
@@ -1530,6 +1593,35 @@ export interface components {
             studentizedResidual: number | null;
             /** @description How far the whole fit moves without this peak, over its own uncertainty. */
             cookDistance: number | null;
+        };
+        PeakProfileAnswer: {
+            points: components["schemas"]["ProfilePoint"][];
+            peak: components["schemas"]["Peak"] | null;
+            /** @description Why there is no peak. no-upper-edge: RF-only rods pass everything above their cutoff. above-apex: U/V is at or above that at which the first region closes. no-rf: no RF voltage. nothing-passes: less than a millionth of the beam passes in the middle of the window. no-maximum-near-the-window: the residence is so short that no peak forms. outside-computed-domain, not-converged: as for points. */
+            peakReason: ("not-asked-for" | "no-upper-edge" | "above-apex" | "no-rf" | "nothing-passes" | "no-maximum-near-the-window" | "outside-computed-domain" | "not-converged") | null;
+            /** @description How the points were computed, the worst of them; null where none was. */
+            method: {
+                /** @description Start phases of the RF over which the mean was taken, at most. */
+                phases: number;
+                /** @description Finest spacing of the times at which the aperture was looked at. */
+                samplesPerCycle: number;
+                /** @description Largest absolute error of a point: phases, gaps between samples and quadrature together. */
+                errorBound: number;
+            } | null;
+        };
+        PeakProfileRequest: {
+            rodSet: components["schemas"]["RodSet"];
+            drive: components["schemas"]["Drive"];
+            residence: components["schemas"]["Residence"];
+            beam: components["schemas"]["Beam"];
+            /** @description Where the transmission is wanted. */
+            mz: components["schemas"]["MzValues"] | components["schemas"]["MzRange"];
+            /** @description Wanted accuracy, 0.001 when absent: absolute for the points, and relative to the height for the peak. */
+            accuracy?: number;
+            /** @description Rate at which the m/z of the window moves while the ions fly, negative downwards; the drive is that at entry. 0 when absent. */
+            scanRate_mzPerS?: number;
+            /** @description false leaves the peak out, so that the whole work may go into the points. true when absent. */
+            findPeak?: boolean;
         };
         /** @description The laboratory's limits of peak-tails. Nothing: it stands here so that nobody takes its absence for a result. */
         PeakTailsCriterion: {
@@ -1678,6 +1770,13 @@ export interface components {
             kind: "product-scan";
             productWidth?: components["schemas"]["Width"];
             cell?: components["schemas"]["CellSetting"];
+        };
+        ProfilePoint: {
+            mz: number;
+            /** @description Share of the beam that passes, 0 to 1. */
+            transmission: number | null;
+            /** @description Why there is no transmission. outside-computed-domain: the motion is too violent, as that of very light ions. not-converged: the accuracy was not reached within the steps that one value may take. no-window-to-scan: a scan rate is stated, but the drive has no window that could move. dc-not-below-rf: with U at or above V the field of one plane never focuses, and nothing is computed. */
+            reason: ("outside-computed-domain" | "not-converged" | "no-window-to-scan" | "dc-not-below-rf") | null;
         };
         /** @description A public key that verifies seals (RFC 7517, RFC 8037). */
         PublicSealKey: {
@@ -3246,6 +3345,100 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["SetPointsAnswer"];
+                };
+            };
+            /**
+             * @description `malformed-json`: The body is empty, is not well-formed JSON in UTF-8, or its top level is no object.
+             *
+             *     `interrupted-body`: The connection ended, or fewer bytes came than Content-Length announced.
+             */
+            400: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `not-acceptable`: The Accept header admits none of the media types in which this endpoint answers. */
+            406: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `body-too-large`: The body is larger than the limit that GET /v1/about shows. */
+            413: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `unsupported-media-type`: Content-Type is not application/json (with or without charset=utf-8), or the body is compressed. */
+            415: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /**
+             * @description `invalid-request`: The body is JSON, or the query well-formed, but breaks the request schema or a rule between its members. `errors` says where.
+             *
+             *     `too-much-work`: Each part is valid, but together they cost more than one request may.
+             */
+            422: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description `internal-error`: A defect of the service, never a property of the request's numbers. Nothing was computed. */
+            500: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    peakProfile: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** @description The share of a beam that passes against m/z, and position, height and widths of the peak */
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PeakProfileRequest"];
+            };
+        };
+        responses: {
+            /** @description The answer. */
+            200: {
+                headers: {
+                    "X-Request-Id": components["headers"]["RequestId"];
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PeakProfileAnswer"];
                 };
             };
             /**

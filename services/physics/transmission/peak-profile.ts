@@ -16,7 +16,8 @@ export interface PeakQuery {
   readonly field: Field;
   /** RF cycles in the field of an ion of this m/z. */
   readonly residence: (mz: number) => number;
-  readonly beam: BeamMoments;
+  /** The same for every m/z, or that of ions of an m/z: at one radial energy light ones are faster. */
+  readonly beam: BeamMoments | ((mz: number) => BeamMoments);
   /** Of transmissions, relative to the height of the peak; 1e-2..1e-5. */
   readonly accuracy: number;
   /** m/z per s (either sign) at which the set m/z moves during the flight; volts and m/z are those at entry. */
@@ -84,13 +85,14 @@ interface Values {
 }
 
 function valuesOf(query: PeakQuery, mzCentre: number, phases: number, maxSteps: number): Values {
-  const { dcVolts, rfVolts, field, beam } = query;
+  const { dcVolts, rfVolts, field } = query;
   const tolerances = { phases, slack: tolerancesOf(query.accuracy).slack };
   const driveGrowth = (query.scanRate ?? 0) / mzCentre;
   const sum = { evaluations: 0, steps: 0, errorBound: 0 };
   let failure: Exclude<PeakAnswer, Peak> | null = null;
   const at = (mz: number): number => {
     if (failure !== null) return 0;
+    const beam = typeof query.beam === "function" ? query.beam(mz) : query.beam;
     const flight = { mz, dcVolts, rfVolts, field, beam, rfCycles: query.residence(mz), driveGrowth };
     const answer = transmissionWithin(flight, tolerances, maxSteps - sum.steps);
     if (answer.kind === "outside-computed-domain") {
