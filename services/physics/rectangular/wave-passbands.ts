@@ -35,7 +35,7 @@ export type WavePassbands =
   | { readonly kind: "not-converged"; readonly steps: number };
 
 /** A window in m/z, where `mzTimesQ` is the product m/z · q of the drive. */
-export function waveWindowInMz(window: WaveWindow, mzTimesQ: number): Passband {
+function waveWindowInMz(window: WaveWindow, mzTimesQ: number): Passband {
   const qHigh = window.high?.q ?? WAVE_EDGE_Q_MAX;
   if (window.low === null) {
     const open = { mzHigh: null, mzCentre: null, mzWidth: null, resolution: null, qLow: null };

@@ -21,7 +21,7 @@ export type WaveTuning =
   | { readonly vary: "duty-cycle"; readonly ratio: number; readonly towards: "high" | "low" };
 
 /** No window is wider than that which is open towards high m/z. */
-export const WAVE_RESOLUTION_INFIMUM = 0.5;
+const WAVE_RESOLUTION_INFIMUM = 0.5;
 /** Above this a double U/V or duty cycle no longer holds the resolution to 1e-9. */
 export const WAVE_RESOLUTION_MAXIMUM = 1e6;
 

@@ -21,7 +21,7 @@ export const WAVE_DOMAIN_LIMIT = 100;
  * Largest Σ √|K| t of a half period, levels that throw the ion out counted twice: rounding of pairs of doubles grows with
  * its exponential. The box |a|, |q| <= 12 stays below 20 whatever the duty cycle.
  */
-export const WAVE_GROWTH_LIMIT = 44;
+const WAVE_GROWTH_LIMIT = 44;
 
 /** Bound of the error of a half-trace over max(1, |half-trace|). */
 export const WAVE_HALF_TRACE_ERROR = 1e-12;

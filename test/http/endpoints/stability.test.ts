@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import { WAVE_HALF_TRACE_ERROR } from "../../../services/physics/rectangular/wave-stability.ts";
 import { RECTANGULAR_WAVES } from "../../reference/rectangular-waves.ts";
 import { answerTo, errorsOf } from "../test-app.ts";
 import { drive, many, otherStatementsOf, rodSet, wave } from "./requests.ts";
@@ -85,7 +86,9 @@ describe("POST /v1/stability", () => {
       const asked = { ...ofPoints({ a, q }), waveform: wave(dutyCycle, coupling) };
       const [{ x }] = (await answerTo(PATH, asked)).results;
       expect(x.stable).toBe(margin > 0);
-      expect(Math.abs(x.halfTrace - halfTrace) / Math.max(1, Math.abs(halfTrace))).toBeLessThan(1e-12);
+      expect(Math.abs(x.halfTrace - halfTrace) / Math.max(1, Math.abs(halfTrace))).toBeLessThan(
+        WAVE_HALF_TRACE_ERROR,
+      );
     }
   });
 
