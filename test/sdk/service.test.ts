@@ -63,6 +63,15 @@ describe("the service, asked through the SDK", () => {
     expect(version).toMatch(/^\d+\.\d+\.\d+$/);
   });
 
+  it("puts a request into the query where the operation takes one, also for another form", async () => {
+    const { regions, box } = await client.stabilityRegions({ aMin: 0, aMax: 0.25, qMax: 1 });
+    expect(box).toEqual({ aMin: 0, aMax: 0.25, qMin: 0, qMax: 1 });
+    expect(regions.map(({ region }) => region.name)).toEqual(["first"]);
+    expect((await client.stabilityRegions({}, { timeout_ms: 5_000 })).regions).toHaveLength(6);
+    const diagram = await client.form("stabilityRegions", "image/svg+xml", { qMax: 1 });
+    expect(diagram).toMatch(/^<svg .*viewBox/);
+  });
+
   it("answers as text where an operation has another form", async () => {
     const page = await client.form("signOffChecks", "text/markdown");
     const { checks } = await client.signOffChecks();

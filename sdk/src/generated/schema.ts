@@ -2805,7 +2805,7 @@ export interface operations {
                 qMin?: number;
                 /** @description Right edge of the box in q, above qMin; 12 when absent. */
                 qMax?: number;
-                /** @description Points on each side of a region, both corners included; 33 when absent. */
+                /** @description Points on each side of a region, both corners included; 17 when absent. */
                 pointsPerArc?: number;
             };
             header?: never;

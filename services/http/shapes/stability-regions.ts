@@ -7,7 +7,7 @@ import { Region } from "./region.ts";
 export const WHOLE_BOX = { aMin: -REGIONS_LIMIT, aMax: REGIONS_LIMIT, qMin: 0, qMax: REGIONS_LIMIT };
 
 /** Points on each of the four sides of a region: enough for a smooth line on paper. */
-export const POINTS_PER_ARC = 33;
+export const POINTS_PER_ARC = 17;
 
 const LARGEST = 100;
 
