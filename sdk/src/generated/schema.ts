@@ -151,7 +151,7 @@ export interface paths {
         put?: never;
         /**
          * The RF and DC, or the frequency, that give passbands of wanted position and width
-         * @description The inverse of the passband, solved exactly: the passband of the calculated drive is centred on the m/z of the ion and as wide as asked, in the region asked for. A rectangular wave has set points in its first region, by volts or by frequency, with DC or by its duty cycle alone. Calculated volts are not settings to apply, and they may exceed any supply.
+         * @description The inverse of the passband, solved exactly: the passband of the calculated drive is centred on the m/z of the ion and as wide as asked, in the region asked for. A rectangular wave has set points in its first region, by volts or by frequency, with DC or by its duty cycle alone. Where residence and beam are given, a width may be taken at half or at a tenth of the height: with a sinusoid, in the first region, by volts. The edges that give this peak are then solved for and centred on the ion, and `passband` states them. Calculated volts are not settings to apply, and they may exceed any supply.
          */
         post: operations["setPoints"];
         delete?: never;
@@ -2147,8 +2147,8 @@ export interface components {
             frequency_MHz: number | null;
             /** @description The duty cycle that goes with these volts; null with a sinusoid. */
             dutyCycle: number | null;
-            /** @description Why there is no drive. width-height-needs-peak-profile: the width is not taken at the edges, and this version cannot convert it. resolution-not-reachable: the region has no window so wide, or none so narrow is computed. needs-reversed-dc: the DC would have to have the other sign, which exchanges x and y: state the duty cycle 1 − d and the other tip. drive-out-of-range, frequency-out-of-range: beyond what a request may state. outside-computed-domain: the wave opens the window at a q beyond those that are computed. */
-            reason: ("width-height-needs-peak-profile" | "resolution-not-reachable" | "needs-reversed-dc" | "drive-out-of-range" | "frequency-out-of-range" | "outside-computed-domain" | "not-converged") | null;
+            /** @description Why there is no drive. width-height-needs-peak-profile: the width is not taken at the edges, which needs residence and beam, and is computed for volts, a sinusoid and the first region only. residence-too-short: even nearly closed edges leave the peak wider than that. no-such-peak: nothing passes such a window, or the peak has no flank that falls to this height. resolution-not-reachable: the region has no window so wide, or none so narrow is computed. needs-reversed-dc: the DC would have to have the other sign, which exchanges x and y: state the duty cycle 1 − d and the other tip. drive-out-of-range, frequency-out-of-range: beyond what a request may state. outside-computed-domain: the wave opens the window at a q beyond those that are computed. */
+            reason: ("width-height-needs-peak-profile" | "residence-too-short" | "no-such-peak" | "resolution-not-reachable" | "needs-reversed-dc" | "drive-out-of-range" | "frequency-out-of-range" | "outside-computed-domain" | "not-converged") | null;
             /** @description a of the ion at the set point. */
             a: number | null;
             /** @description q of the ion at the set point. */
@@ -2181,10 +2181,12 @@ export interface components {
              * @enum {string}
              */
             widthBy?: "dc" | "duty-cycle";
-            /** @description Not used by widths taken at the edges. */
+            /** @description Needed, with the beam, by widths at half or tenth height; not used by widths at the edges. */
             residence?: components["schemas"]["Residence"];
-            /** @description Not used by widths taken at the edges. */
+            /** @description Needed, with the residence, by widths at half or tenth height; not used by widths at the edges. */
             beam?: components["schemas"]["Beam"];
+            /** @description Relative accuracy of widths at half or tenth height, 0.003 when absent. Widths at the edges are exact. */
+            accuracy?: number;
             /** @description 1 to 1000 targets; the results come back in the same order. */
             targets: components["schemas"]["Target"][];
         };

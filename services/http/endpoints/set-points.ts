@@ -5,10 +5,10 @@ import { residenceErrors } from "../../contract/residence.ts";
 import { fieldOf, quadrupole, rectangularWaveOf, waveShapeOf } from "../../contract/rod-set.ts";
 import type { ErrorItem } from "../../contract/rule.ts";
 import { MHzFromHertz } from "../../contract/si.ts";
-import { widthInMz } from "../../contract/width.ts";
 import { defineEndpoint } from "../endpoint.ts";
 import { MOST_ITEMS } from "../limits.ts";
 import { answeredDrive } from "../shapes/answered-drive.ts";
+import { edgesForTarget, edgesWorthOf } from "../shapes/edges-for-height.ts";
 import { ionsInsideErrors } from "../shapes/ions.ts";
 import { passbandsOfDrive } from "../shapes/passbands-of-drive.ts";
 import { type SetPoint, SetPointsAnswer, SetPointsRequest, type Target } from "../shapes/set-points.ts";
@@ -25,7 +25,7 @@ export const setPoints = defineEndpoint({
   tag: "Mass filter",
   summary: "The RF and DC, or the frequency, that give passbands of wanted position and width",
   description:
-    "The inverse of the passband, solved exactly: the passband of the calculated drive is centred on the m/z of the ion and as wide as asked, in the region asked for. A rectangular wave has set points in its first region, by volts or by frequency, with DC or by its duty cycle alone. Calculated volts are not settings to apply, and they may exceed any supply.",
+    "The inverse of the passband, solved exactly: the passband of the calculated drive is centred on the m/z of the ion and as wide as asked, in the region asked for. A rectangular wave has set points in its first region, by volts or by frequency, with DC or by its duty cycle alone. Where residence and beam are given, a width may be taken at half or at a tenth of the height: with a sinusoid, in the first region, by volts. The edges that give this peak are then solved for and centred on the ion, and `passband` states them. Calculated volts are not settings to apply, and they may exceed any supply.",
   request: SetPointsRequest,
   rules: [
     ({ rodSet }) => quadrupole(rodSet, "/rodSet"),
@@ -36,9 +36,11 @@ export const setPoints = defineEndpoint({
     ({ targets }) => ionsInsideErrors(targets, "/targets"),
   ],
   work: {
-    unit: `targets (each counts ${WAVE_WORK}-fold with a rectangular wave)`,
-    of: ({ targets, rodSet }) =>
-      targets.length * (rectangularWaveOf(rodSet.waveform) === null ? 1 : WAVE_WORK),
+    unit: `targets (each counts ${WAVE_WORK}-fold with a rectangular wave, and some hundredfold where its peak has to be computed)`,
+    of: (request) => {
+      const wave = rectangularWaveOf(request.rodSet.waveform) === null ? 1 : WAVE_WORK;
+      return request.targets.reduce((sum, target) => sum + wave * edgesWorthOf(target, request), 0);
+    },
     most: MOST_ITEMS,
   },
   answer: SetPointsAnswer,
@@ -230,16 +232,17 @@ function dutyCycleAlone({ rodSet, widthBy, tip }: SetPointsRequest): ErrorItem[]
   return [{ pointer: "/tip", code: "member-not-taken", detail }];
 }
 
-function solve({ ion, width }: Target, request: SetPointsRequest, maxSteps: number): SetPoint {
+function solve(target: Target, request: SetPointsRequest, maxSteps: number): SetPoint {
   const { rodSet, convention, region = "first", widthBy = "dc" } = request;
   const { waveform } = rodSet;
   const shape = waveShapeOf(waveform);
   const wave = rectangularWaveOf(waveform);
-  const mz = mzOfIon(ion);
-  if (width.at !== "edges") return unsolved(mz, "width-height-needs-peak-profile");
+  const mz = mzOfIon(target.ion);
+  const edges = edgesForTarget(target, request);
+  if (edges.kind === "unsolved") return unsolved(mz, edges.reason);
   const wanted = {
     mzCentre: mz,
-    mzWidth: widthInMz(width, mz),
+    mzWidth: edges.mzWidth,
     field: fieldOf(rodSet),
     keptRfVolts: request.rf === undefined ? null : rfToCanonical(request.rf, shape),
     tip: request.tip ?? "high-ratio",

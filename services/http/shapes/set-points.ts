@@ -2,6 +2,7 @@ import { z } from "zod";
 import { Beam } from "../../contract/beam.ts";
 import { Drive, Rf, VoltageConvention } from "../../contract/drive.ts";
 import { Ion } from "../../contract/ion.ts";
+import { quantity } from "../../contract/quantity.ts";
 import { Residence } from "../../contract/residence.ts";
 import { RodSet } from "../../contract/rod-set.ts";
 import { Width } from "../../contract/width.ts";
@@ -34,8 +35,19 @@ export const SetPointsRequest = z
       description:
         "What makes the width: the DC (when absent), or, with a DC-coupled rectangular wave, its duty cycle alone without DC. The duty cycle of the rod set is then not used, and that of the answer is above a half: x is the pair that is longer at the level with the sign of the ion.",
     }),
-    residence: Residence.optional().meta({ description: "Not used by widths taken at the edges." }),
-    beam: Beam.optional().meta({ description: "Not used by widths taken at the edges." }),
+    residence: Residence.optional().meta({
+      description:
+        "Needed, with the beam, by widths at half or tenth height; not used by widths at the edges.",
+    }),
+    beam: Beam.optional().meta({
+      description:
+        "Needed, with the residence, by widths at half or tenth height; not used by widths at the edges.",
+    }),
+    accuracy: quantity(
+      "Relative accuracy of widths at half or tenth height, 0.003 when absent. Widths at the edges are exact.",
+      1e-3,
+      1e-2,
+    ).optional(),
     targets: z
       .array(Target)
       .min(1)
@@ -58,6 +70,8 @@ export const SetPoint = z
     reason: z
       .enum([
         "width-height-needs-peak-profile",
+        "residence-too-short",
+        "no-such-peak",
         "resolution-not-reachable",
         "needs-reversed-dc",
         "drive-out-of-range",
@@ -68,7 +82,7 @@ export const SetPoint = z
       .nullable()
       .meta({
         description:
-          "Why there is no drive. width-height-needs-peak-profile: the width is not taken at the edges, and this version cannot convert it. resolution-not-reachable: the region has no window so wide, or none so narrow is computed. needs-reversed-dc: the DC would have to have the other sign, which exchanges x and y: state the duty cycle 1 − d and the other tip. drive-out-of-range, frequency-out-of-range: beyond what a request may state. outside-computed-domain: the wave opens the window at a q beyond those that are computed.",
+          "Why there is no drive. width-height-needs-peak-profile: the width is not taken at the edges, which needs residence and beam, and is computed for volts, a sinusoid and the first region only. residence-too-short: even nearly closed edges leave the peak wider than that. no-such-peak: nothing passes such a window, or the peak has no flank that falls to this height. resolution-not-reachable: the region has no window so wide, or none so narrow is computed. needs-reversed-dc: the DC would have to have the other sign, which exchanges x and y: state the duty cycle 1 − d and the other tip. drive-out-of-range, frequency-out-of-range: beyond what a request may state. outside-computed-domain: the wave opens the window at a q beyond those that are computed.",
       }),
     a: z.number().nullable().meta({ description: "a of the ion at the set point." }),
     q: z.number().nullable().meta({ description: "q of the ion at the set point." }),
