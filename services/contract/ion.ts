@@ -8,14 +8,9 @@ export const Ion = z
     z
       .strictObject({
         mz: Mz,
-        charge: z
-          .int()
-          .min(-200)
-          .max(200)
-          .optional()
-          .meta({
-            description: "Charge number with sign; 1 or -1 by the polarity when absent. Zero is refused.",
-          }),
+        charge: z.int().min(-200).max(200).optional().meta({
+          description: "Charge number with sign; 1 or -1 by the polarity when absent. Zero is refused.",
+        }),
         label: Label.optional(),
       })
       .meta({ id: "IonByMz" }),

@@ -23,7 +23,7 @@ export function passesIfWindowMoves(filtering: Filtering, passes: Passes): Passe
 const CENTRINGS = 4;
 
 /** The set m/z, where the ion in the middle of the window would pass. */
-export function passesIfSetElsewhere(
+function passesIfSetElsewhere(
   { window, mz, setMz, setMzLever, windowIfSetTo }: Filtering,
   passes: Passes,
 ): PassesIf | null {

@@ -55,10 +55,7 @@ export function windowsOf(filter: Placed<MassFilterStage>): WindowSource {
 }
 
 /** The volts of a mass filter at every set m/z, null where its operating point states none. */
-export function supplyLineOf({
-  stage: { operatingPoint },
-  pointer,
-}: Placed<MassFilterStage>): SupplyLine | null {
+function supplyLineOf({ stage: { operatingPoint }, pointer }: Placed<MassFilterStage>): SupplyLine | null {
   switch (operatingPoint?.by) {
     case "drives":
       return lineThroughPoints(operatingPoint, `${pointer}/operatingPoint`);

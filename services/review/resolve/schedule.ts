@@ -139,7 +139,7 @@ function turnsOf(moments: readonly Moment[], acquisitions: number): Turns[] {
 }
 
 /** Whether a moment leaves less dwell time to each, or, where that is equal, has the longer round. */
-export function isBusier(one: Moment, other: Moment): boolean {
+function isBusier(one: Moment, other: Moment): boolean {
   const [dwell, otherDwell] = [one.sharedDwell_ms ?? Infinity, other.sharedDwell_ms ?? Infinity];
   if (dwell !== otherDwell) return dwell < otherDwell;
   return (one.cycle_ms ?? 0) > (other.cycle_ms ?? 0);

@@ -12,7 +12,7 @@ export const key = await readSealingKey(
   JSON.stringify(generateKeyPairSync("ed25519").privateKey.export({ format: "jwk" })),
 );
 
-export async function sealed(record: SealedRecord): Promise<SealedRecord> {
+async function sealed(record: SealedRecord): Promise<SealedRecord> {
   const jws = await seal(record.digests.record, new Date("2026-03-04T05:06:07Z"), "rodset-record-seal", key);
   return { ...record, seal: { jws } };
 }
