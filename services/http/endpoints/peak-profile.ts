@@ -19,18 +19,15 @@ import {
 type Request = z.output<typeof PeakProfileRequest>;
 type Answer = z.input<typeof PeakProfileAnswer>;
 
-/** About a quarter of a second of one core, by random requests over beams, residences, accuracies and scan rates. */
-const MOST_CYCLES = 35_000;
-/** Values that it takes to find a peak and its flanks. */
-const VALUES_OF_PEAK = 50;
+/** Some quarter of a second of one core: an RF cycle of an ion that is not lost costs about 10 us. */
+const MOST_CYCLES = 25_000;
+/** A peak takes 40 to 50 values, of which those on the flanks cost less. */
+const VALUES_OF_PEAK = 36;
 /** A field that grows has to be followed cycle by cycle. */
-const SCAN_WORK = 2;
-/**
- * Start phases and polygons cost as much as so many cycles over the root of the accuracy, and up to three times that where
- * a flight is so short that many of its rows matter.
- */
-const PHASE_WORK = 4;
-const FEW_CYCLES = 4;
+const SCAN_WORK = 2.5;
+/** Start phases and polygons cost 1/√accuracy cycles, and several times that where a flight is so short that most rows matter. */
+const FEW_CYCLES = 40;
+const FEWEST_CYCLES = 6;
 
 /** Twice what a value took in any case that converged: per root of the inverse accuracy, and per RF cycle. */
 const STEPS_OF_PHASES = 600;
@@ -42,7 +39,7 @@ export const peakProfile = defineEndpoint({
   path: "/v1/peak-profile",
   tag: "Mass filter",
   summary: "The share of a beam that passes against m/z, and position, height and widths of the peak",
-  description: `Transmission of an ideal quadrupole field with a hard aperture at r0, for a centred Gaussian beam and a residence. Deterministic: for each start phase of the RF the states that survive form polygons, whose measure is computed, and the mean over the phase is taken; the answer states the error bound that was reached. Widths at half and at a tenth of the height are those of this peak and differ from the distance of the stability edges. Not modelled: fringe fields, round rods, collisions, space charge, the exit and a beam off the axis, so that real peaks have tails that this one lacks. One request may ask for ${MOST_CYCLES} RF cycles of work: (number of points, and ${VALUES_OF_PEAK} more for the peak) times (RF cycles, ${SCAN_WORK}-fold with a scan rate, plus ${PHASE_WORK}/√accuracy, up to three times that for flights of a few cycles).`,
+  description: `Transmission of an ideal quadrupole field with a hard aperture at r0, for a centred Gaussian beam and a residence. Deterministic: for each start phase of the RF the states that survive form polygons, whose measure is computed, and the mean over the phase is taken; the answer states the error bound that was reached. Widths at half and at a tenth of the height are those of this peak and differ from the distance of the stability edges. Not modelled: fringe fields, round rods, collisions, space charge, the exit and a beam off the axis, so that real peaks have tails that this one lacks. One request may ask for ${MOST_CYCLES} RF cycles of work: (number of points, and ${VALUES_OF_PEAK} more for the peak) times (RF cycles, ${SCAN_WORK}-fold with a scan rate, plus 1/√accuracy, several times that for flights of a few cycles).`,
   request: PeakProfileRequest,
   rules: [
     ({ rodSet }) => sinusoidalQuadrupole(rodSet, "/rodSet"),
@@ -95,10 +92,10 @@ const scanRateOf = ({ scanRate_mzPerS = 0 }: Request): number => scanRate_mzPerS
 
 function cyclesOfWork(request: Request): number {
   const perCycle = scanRateOf(request) === 0 ? 1 : SCAN_WORK;
-  const phases = PHASE_WORK / Math.sqrt(accuracyOf(request));
+  const phases = 1 / Math.sqrt(accuracyOf(request));
   const of = (mz: number) => {
     const cycles = cyclesAt(mz, request);
-    return cycles * perCycle + phases * (1 + FEW_CYCLES / Math.max(cycles, 2));
+    return cycles * perCycle + phases * (1 + FEW_CYCLES / Math.max(cycles, FEWEST_CYCLES));
   };
   let work = 0;
   for (const mz of mzValuesOf(request)) work += of(mz);

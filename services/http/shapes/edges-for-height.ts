@@ -11,12 +11,13 @@ export type EdgesForHeight =
   | { readonly kind: "unsolved"; readonly reason: NonNullable<SetPoint["reason"]> };
 
 const DEFAULT_ACCURACY = 3e-3;
-/** Work of one value beyond its RF cycles, as in the peak profile; and that of some eighty values in targets at the edges. */
-const PHASE_WORK = 4;
-const WORK_OF_PEAKS = 2.3;
+/** What a target costs for each RF cycle, in targets at the edges, of which 1,000 stand for a quarter of a second. */
+const WORK_OF_PEAKS = 2.6;
 /** A finer width takes a peak more. */
 const FINE_ACCURACY = 2e-3;
-const WORK_OF_FINE_PEAKS = 3.7;
+const WORK_OF_FINE_PEAKS = 4;
+/** In a short flight the search goes on to nearly closed edges, and peaks are wide. */
+const LEAST_WORK = 600;
 
 /** Residence and beam where a peak can be computed, null where the width stays without an answer. */
 function peakGiven({ rodSet, region, solveFor, residence, beam }: SetPointsRequest) {
@@ -70,12 +71,12 @@ function reasonOf(reason: NoEdges): NonNullable<SetPoint["reason"]> {
   }
 }
 
-/** How many targets count as much: 1,000 of them stand for about a quarter of a second. */
+/** As how many targets at the edges this one counts. */
 export function edgesWorthOf(target: Target, request: SetPointsRequest): number {
   const given = peakGiven(request);
   if (target.width.at === "edges" || given === null) return 1;
   const { rodSet, accuracy = DEFAULT_ACCURACY } = request;
   const rfCycles = rfCyclesOf(given.residence, rodSet, mzOfIon(target.ion))!;
   const peaks = accuracy < FINE_ACCURACY ? WORK_OF_FINE_PEAKS : WORK_OF_PEAKS;
-  return Math.ceil(peaks * (rfCycles + PHASE_WORK / Math.sqrt(accuracy)));
+  return Math.ceil(Math.max(LEAST_WORK, peaks * (rfCycles + 1 / Math.sqrt(accuracy))));
 }
