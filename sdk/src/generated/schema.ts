@@ -1163,6 +1163,8 @@ export interface components {
                 a: number;
                 q: number;
             }[];
+            /** @description Mean of both pairs against ground, which moves all ions alike and is no part of U; null where the drive does not state both pairs. */
+            rodOffset_V: number | null;
         };
         /** @description What runs the service; no names. */
         Host: {

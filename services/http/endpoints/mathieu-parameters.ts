@@ -1,5 +1,5 @@
 import type { z } from "zod";
-import { driveToCanonical, rfToCanonical } from "../../contract/drive.ts";
+import { dcToCanonical, driveToCanonical, rfToCanonical } from "../../contract/drive.ts";
 import { mzOfIon } from "../../contract/ion.ts";
 import { fieldOf, sinusoidalQuadrupole } from "../../contract/rod-set.ts";
 import { hertzFromMHz, MHzFromHertz, metresFromMm, mmFromMetres } from "../../contract/si.ts";
@@ -65,7 +65,29 @@ export const mathieuParameters = defineEndpoint({
         },
         ions: [{ mz: 499.0625 }],
       },
-      answer: { find: "parameters", results: [{ mz: 499.0625, a: 0.237079204891, q: 0.706995041161 }] },
+      answer: {
+        find: "parameters",
+        results: [{ mz: 499.0625, a: 0.237079204891, q: 0.706995041161 }],
+        rodOffset_V: null,
+      },
+    },
+    "pairs-to-ground": {
+      summary: "The same ion with both pairs stated against ground, 10 V above it",
+      source: SOURCES.peakShapes,
+      request: {
+        find: "parameters",
+        rodSet: { fieldRadius_mm: 4, frequency_MHz: 1.2 },
+        drive: {
+          rf: { volts: 831.55739482, as: "zero-to-peak", between: "pole-and-ground" },
+          dc: { pairX_V: 149.42457479, pairY_V: -129.42457479 },
+        },
+        ions: [{ mz: 499.0625 }],
+      },
+      answer: {
+        find: "parameters",
+        results: [{ mz: 499.0625, a: 0.237079204891, q: 0.706995041161 }],
+        rodOffset_V: 10,
+      },
     },
     "drive-at-the-apex": {
       summary: "Volts that bring m/z 1000 to the apex",
@@ -143,7 +165,11 @@ export const mathieuParameters = defineEndpoint({
   handler(request): z.input<typeof MathieuParametersAnswer> {
     switch (request.find) {
       case "parameters":
-        return { find: "parameters", results: findParameters(request) };
+        return {
+          find: "parameters",
+          results: findParameters(request),
+          rodOffset_V: dcToCanonical(request.drive.dc).rodOffset_V,
+        };
       case "drive":
         return { find: "drive", results: findDrive(request) };
       case "mz":

@@ -59,6 +59,10 @@ const FoundParameters = z
   .strictObject({
     find: z.literal("parameters"),
     results: z.array(z.strictObject({ mz: z.number(), a: z.number(), q: z.number() })),
+    rodOffset_V: z.number().nullable().meta({
+      description:
+        "Mean of both pairs against ground, which moves all ions alike and is no part of U; null where the drive does not state both pairs.",
+    }),
   })
   .meta({ id: "FoundParameters" });
 const FoundDrive = z

@@ -13,7 +13,19 @@ describe("POST /v1/mathieu-parameters", () => {
       answerTo(PATH, { find: "parameters", rodSet: rods, drive: stated, ions: [{ mz: 500 }] });
     const plain = await found(drive(831.55739482, 139.42457479));
     for (const stated of otherStatementsOf(831.55739482, 139.42457479))
-      expectClose(await found(stated), plain, 1e-14);
+      expectClose((await found(stated)).results, plain.results, 1e-14);
+  });
+
+  it("tells the rod offset from U where both pairs are stated against ground", async () => {
+    const offsetOf = async (dc: object) => {
+      const { rf } = drive(831.55739482, 139.42457479);
+      return (
+        await answerTo(PATH, { find: "parameters", rodSet: rods, drive: { rf, dc }, ions: [{ mz: 500 }] })
+      ).rodOffset_V;
+    };
+    expect(await offsetOf({ pairX_V: 150, pairY_V: -130 })).toBe(10);
+    expect(await offsetOf({ pairX_V: -130, pairY_V: 150 })).toBe(10);
+    expect(await offsetOf({ volts: 140, between: "pole-and-ground" })).toBeNull();
   });
 
   // V = 7.2217 M f² r0² and U = 1.2121 M f² r0² (MHz, cm, pole-to-ground, zero-to-peak), recomputed from CODATA 2022;
