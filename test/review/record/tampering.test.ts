@@ -1,3 +1,4 @@
+import { isDeepStrictEqual } from "node:util";
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { integrityOf } from "../../../services/review/record/integrity.ts";
@@ -55,6 +56,7 @@ describe("tampering is found", () => {
 
   test("in random bytes of the file, wherever it is still JSON that says something else", async () => {
     const bytes = Buffer.from(JSON.stringify(small));
+    const original = throughJson(small);
     let altered = 0;
     await fc.assert(
       fc.asyncProperty(fc.nat(bytes.length - 1), fc.integer({ min: 1, max: 255 }), async (at, flip) => {
@@ -66,11 +68,12 @@ describe("tampering is found", () => {
         } catch {
           return;
         }
-        if (keptRecordErrors(kept, "").length > 0) return;
+        // The last of 17 digits may name the same double: then the file says nothing else.
+        if (isDeepStrictEqual(kept, original) || keptRecordErrors(kept, "").length > 0) return;
         altered++;
         expect(await isTold(kept as Kept)).toBe(true);
       }),
-      { numRuns: 1500 },
+      { numRuns: 1500, examples: [[3691, 1]] },
     );
     expect(altered).toBeGreaterThan(300);
   });
