@@ -9,4 +9,7 @@ export const hertzFromMHz = (frequency_MHz: number): number => frequency_MHz * 1
 export const MHzFromHertz = (frequency: number): number => frequency / 1e6;
 export const kHzFromHertz = (frequency: number): number => frequency / 1e3;
 export const microsecondsFromSeconds = (time: number): number => time * 1e6;
+export const secondsFromMicroseconds = (time_us: number): number => time_us / 1e6;
+export const millisecondsFromSeconds = (time: number): number => time * 1e3;
 export const ppmFromRatio = (ratio: number): number => ratio * 1e6;
+export const ratioFromPpm = (parts_ppm: number): number => parts_ppm / 1e6;

@@ -1,6 +1,6 @@
 import { createScanner } from "jsonc-parser";
+import { jsonPointer } from "../contract/json-pointer.ts";
 import type { ErrorItem } from "../contract/rule.ts";
-import { jsonPointer } from "./json-pointer.ts";
 
 /* Kinds of token; the library declares them in a way that does not outlive its own compilation. */
 const OPEN_BRACE = 1;

@@ -1,6 +1,6 @@
+import { jsonPointer } from "../contract/json-pointer.ts";
 import type { AnyEndpoint } from "./endpoint.ts";
 import { errorList } from "./error-list.ts";
-import { jsonPointer } from "./json-pointer.ts";
 import { invalidRequest } from "./problem-document.ts";
 import { LONGEST_NAME_SHOWN } from "./schema-errors.ts";
 

@@ -1,9 +1,9 @@
 import { z } from "zod";
+import { jsonPointer } from "../contract/json-pointer.ts";
 import type { ErrorItem } from "../contract/rule.ts";
 import type { ErrorCode } from "./error-codes.ts";
 import { type ErrorList, errorList } from "./error-list.ts";
 import { expectationOf, membersOf, oneOf } from "./expectation.ts";
-import { jsonPointer } from "./json-pointer.ts";
 import { isMissing, issuesOfNearestArms, memberOf } from "./nearest-arm.ts";
 
 type Issue = z.core.$ZodIssue;

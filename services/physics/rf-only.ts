@@ -40,6 +40,12 @@ function driveStrength(rfVolts: number, mz: number, field: Field): number {
   return (CHARGE_PER_ATOMIC_MASS * rfVolts) / (mz * edgeVelocity * edgeVelocity);
 }
 
+/** Adiabaticity up to which an effective potential describes the motion (Gerlich 1992, from memory). */
+export const ADIABATIC_LIMIT = 0.3;
+
+/** Part of r0 within which ions are guided safely at that adiabaticity (Gerlich 1992, from memory). */
+export const USABLE_RADIUS_FRACTION = 0.8;
+
 /**
  * Effective potential in V (eV per elementary charge) at `radiusFraction` of r0 in a rod set of `polePairs` n >= 2:
  * V* = n² e V² / (4 m Ω² r0²) · (r/r0)^(2n−2), m per charge (Gerlich, Adv. Chem. Phys. 82 (1992) 1, from memory).

@@ -64,10 +64,12 @@ const counted = {
   neighbours: z.array(Neighbour).max(50).optional(),
 };
 
+export const ScanRate_mzPerS = quantity("Scan rate in m/z per second.", 1e-3, 1e8);
+
 const scanned = {
   mzFrom: Mz.meta({ description: "m/z at which the scan starts." }),
   mzTo: Mz.meta({ description: "m/z at which the scan ends; above mzFrom." }),
-  rate_mzPerS: quantity("Scan rate in m/z per second.", 1e-3, 1e8),
+  rate_mzPerS: ScanRate_mzPerS,
 };
 
 const precursorMembers = {

@@ -5,6 +5,13 @@ import { Acquisition, Polarity } from "./acquisition.ts";
 
 export const MAX_ACQUISITIONS = 2000;
 
+export const PeakWidth_s = quantity("Width of the chromatographic peak in s.", 1e-3, 1e5);
+export const Cycle_ms = quantity(
+  "Wanted cycle time in ms, shared among the acquisitions of the moment.",
+  0.01,
+  1e6,
+);
+
 const Timing = z
   .discriminatedUnion("mode", [
     z
@@ -13,11 +20,7 @@ const Timing = z
     z
       .strictObject({
         mode: z.literal("cycle"),
-        cycle_ms: quantity(
-          "Wanted cycle time in ms, shared among the acquisitions of the moment.",
-          0.01,
-          1e6,
-        ),
+        cycle_ms: Cycle_ms,
         dwellMin_ms: quantity("Shortest dwell time that is given, in ms.", 0, 1e6),
         dwellMax_ms: quantity("Longest dwell time that is given, in ms.", 0, 1e6),
       })
@@ -52,7 +55,7 @@ export const Method = z
     timing: Timing,
     chromatographicPeakWidth: z
       .strictObject({
-        value_s: quantity("Width of the chromatographic peak in s.", 1e-3, 1e5),
+        value_s: PeakWidth_s,
         at: z.enum(["base", "half-height"]),
       })
       .optional(),

@@ -1,13 +1,14 @@
 import { CAUTIONS } from "../contract/cautions.ts";
 import { CHECKS } from "./checks.ts";
 import { type Criteria, limitsOf } from "./criteria.ts";
-import { type Finding, type Outcome, worstOutcome } from "./finding.ts";
+import { type Finding, worstOutcome } from "./finding.ts";
 import { judge } from "./observation.ts";
 import { resolveMethod } from "./resolve/resolve.ts";
 import { settingsOf } from "./settings.ts";
 import type { Assessment } from "./sign-off-answer.ts";
 import type { NotShown, SignOffRequest, WaivedCheck } from "./sign-off-schema.ts";
 import { listed } from "./statement.ts";
+import { countOutcomes, verdictOf } from "./verdict.ts";
 
 /** Instrument, method and criteria in; findings and verdict out. Pure and deterministic. */
 export function signOff({ instrument, method, criteria }: SignOffRequest): Assessment {
@@ -26,9 +27,7 @@ export function signOff({ instrument, method, criteria }: SignOffRequest): Asses
     }
     findings.push(...found);
   }
-  const verdict =
-    worstOutcome(findings.filter(({ required }) => required).map(({ outcome }) => outcome)) ??
-    "indeterminate";
+  const verdict = verdictOf(findings);
   const notShown = notShownOf(findings);
   return {
     verdict,
@@ -45,18 +44,6 @@ export function signOff({ instrument, method, criteria }: SignOffRequest): Asses
 
 function criteriaNamed(criteria: Criteria | undefined): Assessment["criteria"] {
   return criteria === undefined ? null : { id: criteria.id, revision: criteria.revision };
-}
-
-function countOutcomes(findings: readonly Finding[]): Assessment["outcomeCounts"] {
-  const counts: Record<Outcome, number> = {
-    pass: 0,
-    caution: 0,
-    fail: 0,
-    indeterminate: 0,
-    "not-applicable": 0,
-  };
-  for (const { outcome } of findings) counts[outcome]++;
-  return counts;
 }
 
 /** What no verdict covers: findings that lack an input and do not count, brought together where they lack the same. */

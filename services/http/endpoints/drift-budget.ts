@@ -2,7 +2,7 @@ import type { z } from "zod";
 import { driveToCanonical } from "../../contract/drive.ts";
 import { fieldOf, sinusoidalQuadrupole } from "../../contract/rod-set.ts";
 import type { ErrorItem } from "../../contract/rule.ts";
-import { ppmFromRatio } from "../../contract/si.ts";
+import { ppmFromRatio, ratioFromPpm } from "../../contract/si.ts";
 import { widthInMz } from "../../contract/width.ts";
 import { edgeSensitivities, sensitivitiesForResolution } from "../../physics/drift.ts";
 import {
@@ -171,10 +171,10 @@ function toleranceBudget(
 ): NonNullable<Answer["budget"]> {
   const { fieldRadius_ppm = 0, frequency_ppm = 0, amplitude_ppm = 0, ratio_ppm = 0 } = stated;
   const { causes, worstCase, rootSumSquare } = driftBudgetOf(known, {
-    fieldRadius: fieldRadius_ppm / 1e6,
-    frequency: frequency_ppm / 1e6,
-    amplitude: amplitude_ppm / 1e6,
-    ratio: ratio_ppm / 1e6,
+    fieldRadius: ratioFromPpm(fieldRadius_ppm),
+    frequency: ratioFromPpm(frequency_ppm),
+    amplitude: ratioFromPpm(amplitude_ppm),
+    ratio: ratioFromPpm(ratio_ppm),
   });
   return {
     causes: causes.map(({ cause, tolerance, shifts }) => ({
@@ -185,8 +185,8 @@ function toleranceBudget(
     worstCase,
     rootSumSquare,
     widthAtRatioEnds: {
-      raised: widthWithRatio(known, ratio_ppm / 1e6),
-      lowered: widthWithRatio(known, -ratio_ppm / 1e6),
+      raised: widthWithRatio(known, ratioFromPpm(ratio_ppm)),
+      lowered: widthWithRatio(known, ratioFromPpm(-ratio_ppm)),
     },
   };
 }
@@ -200,7 +200,12 @@ function widthWithRatio({ ratio, mzTimesQ, mzWidth }: KnownWindow, change: numbe
 }
 
 function perPpm({ low, high, centre, width }: Shifts): Shifts {
-  return { low: low / 1e6, high: high / 1e6, centre: centre / 1e6, width: width / 1e6 };
+  return {
+    low: ratioFromPpm(low),
+    high: ratioFromPpm(high),
+    centre: ratioFromPpm(centre),
+    width: ratioFromPpm(width),
+  };
 }
 
 function inPpm(relative: number | null): number | null {

@@ -7,10 +7,12 @@ import type { ErrorItem } from "../../contract/rule.ts";
 import { kHzFromHertz } from "../../contract/si.ts";
 import { qOf } from "../../physics/mathieu-parameters.ts";
 import {
+  ADIABATIC_LIMIT,
   adiabaticity,
   lowMassCutoff,
   secondWindow,
   secularFrequency,
+  USABLE_RADIUS_FRACTION,
   wellDepth,
 } from "../../physics/rf-only.ts";
 import { pointStability } from "../../physics/stability.ts";
@@ -18,10 +20,6 @@ import { defineEndpoint } from "../endpoint.ts";
 import { MOST_ITEMS } from "../limits.ts";
 import { Ions, ionsErrors } from "../shapes/ions.ts";
 import { SOURCES } from "../shapes/sources.ts";
-
-/** Gerlich, Adv. Chem. Phys. 82 (1992) 1 (from memory): ions that stay within 0.8 r0 at η <= 0.3 there are guided safely. */
-const USABLE_RADIUS_FRACTION = 0.8;
-const ADIABATIC_LIMIT = 0.3;
 
 const RfOnlyRequest = z
   .strictObject({

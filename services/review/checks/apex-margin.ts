@@ -1,3 +1,4 @@
+import { ppmFromRatio, ratioFromPpm } from "../../contract/si.ts";
 import { APEX_RATIO, apexMarginOf } from "../../physics/first-region.ts";
 import { ratioForResolution } from "../../physics/set-point.ts";
 import { defineCheck } from "../check.ts";
@@ -67,7 +68,7 @@ function marginToApex(setting: Filtering, pass: Bounds, caution: Bounds): Readin
       const statement = `${name} at m/z ${setMz}: without DC of the right sign nothing is selected.`;
       return { kind: "impossible", ...judged, evidence: "computed", passesIf, statement };
     }
-    return margin(apexMarginOf(dcVolts / rfVolts) * 1e6, "computed", passesIf);
+    return margin(ppmFromRatio(apexMarginOf(dcVolts / rfVolts)), "computed", passesIf);
   }
   if (window.kind === "no-window") return notApplicable(window.reason);
   if (!standsForEdges(window, "narrow")) {
@@ -75,7 +76,7 @@ function marginToApex(setting: Filtering, pass: Bounds, caution: Bounds): Readin
   }
   const solved = ratioForResolution(centreOf(window) / widthOf(window));
   if (solved.kind !== "ratio") return lacking(`A scan line of ${name}`, [window.widthPointer]);
-  return margin(solved.margin * 1e6, window.evidence, () => passesIfWider(window, pass));
+  return margin(ppmFromRatio(solved.margin), window.evidence, () => passesIfWider(window, pass));
 
   function margin(
     value: number,
@@ -103,7 +104,7 @@ const LOWEST_RESOLUTION = 1;
 function neededRatio(pass: Bounds): { readonly min: number; readonly max: number } | null {
   const widest = ratioForResolution(LOWEST_RESOLUTION);
   if (pass.min === null || widest.kind !== "ratio") return null;
-  return { min: widest.ratio, max: APEX_RATIO * (1 - pass.min * 1e-6) };
+  return { min: widest.ratio, max: APEX_RATIO * (1 - ratioFromPpm(pass.min)) };
 }
 
 function passesIfOnRow({ dcLever, volts }: WindowDrive, row: number, pass: Bounds): PassesIf | null {
@@ -129,14 +130,14 @@ function passesIfByOneRow(settings: readonly Filtering[], pass: Bounds): PassesI
 function passes({ rfVolts, dcVolts }: WindowDrive["volts"], pass: Bounds): boolean {
   return (
     dcVolts >= NO_DC_OVER_RF * rfVolts &&
-    (pass.min === null || apexMarginOf(dcVolts / rfVolts) * 1e6 >= pass.min)
+    (pass.min === null || ppmFromRatio(apexMarginOf(dcVolts / rfVolts)) >= pass.min)
   );
 }
 
 function passesIfWider(window: KnownWindow, pass: Bounds): PassesIf | null {
   if (pass.min === null) return null;
   const centre = centreOf(window);
-  const wide = resolutionAtMargin(pass.min * 1e-6);
+  const wide = resolutionAtMargin(ratioFromPpm(pass.min));
   return wide === null ? null : passesIfWithin(window.widthLever, { min: centre / wide, max: null });
 }
 

@@ -1,5 +1,5 @@
 import { fieldOf } from "../../contract/rod-set.ts";
-import { adiabaticity, wellDepth } from "../../physics/rf-only.ts";
+import { ADIABATIC_LIMIT, adiabaticity, USABLE_RADIUS_FRACTION, wellDepth } from "../../physics/rf-only.ts";
 import { defineCheck } from "../check.ts";
 import type { Bounds } from "../finding.ts";
 import { passesIfWithin } from "../lever.ts";
@@ -7,10 +7,6 @@ import { boundsOf, LowerLimit } from "../limit.ts";
 import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
 import type { GuidedIon, Guiding } from "../resolve/resolved-method.ts";
 import { digits } from "../statement.ts";
-
-/** Motion in an effective potential holds while the adiabaticity stays below this, out to this part of the field radius. */
-const ADIABATIC_LIMIT = 0.3;
-const USABLE_RADIUS = 0.8;
 
 export const cellWellDepth = defineCheck({
   id: "cell-well-depth",
@@ -84,13 +80,13 @@ function depthOverEnergy(
     ]);
   }
   const field = fieldOf(rodSet);
-  const eta = adiabaticity(rfVolts, mz, field, polePairs, USABLE_RADIUS);
+  const eta = adiabaticity(rfVolts, mz, field, polePairs, USABLE_RADIUS_FRACTION);
   if (eta > ADIABATIC_LIMIT) {
     return notApplicable(
       `The adiabaticity of m/z ${mz} in ${name} is ${digits(eta, 3)}, above ${ADIABATIC_LIMIT}: an effective potential does not describe its motion.`,
     );
   }
-  const depth = wellDepth(rfVolts, mz, field, polePairs, USABLE_RADIUS);
+  const depth = wellDepth(rfVolts, mz, field, polePairs, USABLE_RADIUS_FRACTION);
   const value = depth / energy;
   return {
     kind: "value",
@@ -103,8 +99,8 @@ function depthOverEnergy(
       pass.min === null
         ? null
         : passesIfWithin(cell.voltsLever, {
-            min: Math.sqrt((pass.min * energy) / wellDepth(1, mz, field, polePairs, USABLE_RADIUS)),
-            max: ADIABATIC_LIMIT / adiabaticity(1, mz, field, polePairs, USABLE_RADIUS),
+            min: Math.sqrt((pass.min * energy) / wellDepth(1, mz, field, polePairs, USABLE_RADIUS_FRACTION)),
+            max: ADIABATIC_LIMIT / adiabaticity(1, mz, field, polePairs, USABLE_RADIUS_FRACTION),
           }),
     statement: `${which === "precursor" ? "Precursor" : "Product"} m/z ${mz}: the well at 0.8 r0 of ${name} is ${digits(depth, 4)} eV per charge deep, ${digits(value, 3)} times the stated radial energy (adiabaticity ${digits(eta, 2)}).`,
   };

@@ -1,10 +1,11 @@
 import { Time_ms } from "../../contract/quantity.ts";
-import { flightTimeOf } from "../../contract/residence.ts";
+import { millisecondsFromSeconds } from "../../contract/si.ts";
 import { defineCheck } from "../check.ts";
 import type { Bounds } from "../finding.ts";
 import { leverOn, passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
 import { lacking, type Observation, type Reading } from "../observation.ts";
+import { flightThrough } from "../resolve/flight.ts";
 import { previousWithSameProduct } from "../resolve/predecessor.ts";
 import type { ResolvedAcquisition, ResolvedMethod } from "../resolve/resolved-method.ts";
 import { digits } from "../statement.ts";
@@ -101,16 +102,10 @@ function flight(
   let total_ms = 0;
   stages.forEach(({ stage, pointer }, index) => {
     if (stage.role === "ion-trap") return;
-    const { residence, rodSet } = stage;
-    if (residence === undefined) missing.push(`${pointer}/residence`);
-    else if ("flightTime_us" in residence) total_ms += residence.flightTime_us / 1e3;
-    else if (rodSet === undefined) missing.push(`${pointer}/rodSet`);
-    else {
-      const mz = cell >= 0 && index > cell ? product : heaviest;
-      const time = flightTimeOf(residence, rodSet, mz);
-      if (time === null) missing.push(`${pointer}/rodSet/rodLength_mm`);
-      else total_ms += time * 1e3;
-    }
+    const mz = cell >= 0 && index > cell ? product : heaviest;
+    const through = flightThrough(stage, pointer, mz);
+    missing.push(...through.missing);
+    total_ms += millisecondsFromSeconds(through.time ?? 0);
   });
   return total_ms;
 }

@@ -1,8 +1,8 @@
-import { quantity } from "../../contract/quantity.ts";
 import { defineCheck } from "../check.ts";
 import type { Bounds, PassesIf } from "../finding.ts";
 import { leverOn, passesIfWithin } from "../lever.ts";
 import { boundsOf, LowerLimit } from "../limit.ts";
+import { Cycle_ms, PeakWidth_s } from "../method.ts";
 import { lacking, notApplicable, type Reading } from "../observation.ts";
 import { NO_TIME_MS } from "../resolve/negligible.ts";
 import type { ResolvedMethod } from "../resolve/resolved-method.ts";
@@ -74,8 +74,6 @@ function pointsAtBusiest(resolved: ResolvedMethod, pass: Bounds, caution: Bounds
   };
 }
 
-const PeakWidth_s = quantity("A peak width in s.", 1e-3, 1e5);
-
 function longestRound(moments: readonly Moment[]): Moment {
   return moments.reduce((worst, moment) => (moment.cycle_ms! > worst.cycle_ms! ? moment : worst));
 }
@@ -90,7 +88,7 @@ function passesIfShorter({ method, schedule }: ResolvedMethod, round_ms: number)
     ...rounds.map(({ fixed_ms, sharing }) => fixed_ms + sharing * timing.dwellMin_ms),
   );
   if (shortest_ms < round_ms) {
-    const cycle = leverOn("/method/timing/cycle_ms", "ms", { minValue: 0.01, maxValue: 1e6 });
+    const cycle = leverOn("/method/timing/cycle_ms", "ms", Cycle_ms);
     return passesIfWithin(cycle, { min: null, max: round_ms });
   }
   if (timing.cycle_ms > round_ms) return null;

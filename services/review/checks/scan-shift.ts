@@ -1,10 +1,12 @@
-import { flightTimeOf } from "../../contract/residence.ts";
+import { microsecondsFromSeconds } from "../../contract/si.ts";
 import { scanLossOf } from "../../physics/transit.ts";
+import { ScanRate_mzPerS } from "../acquisition.ts";
 import { defineCheck } from "../check.ts";
 import type { Bounds } from "../finding.ts";
 import { leverOn, passesIfWithin } from "../lever.ts";
 import { boundsOf, UpperLimit } from "../limit.ts";
 import { lacking, notApplicable, type Observation, type Reading } from "../observation.ts";
+import { flightThrough } from "../resolve/flight.ts";
 import type { Filtering, ResolvedAcquisition } from "../resolve/resolved-method.ts";
 import { heightNote, standsForEdges, widthOf } from "../resolve/window.ts";
 import { digits } from "../statement.ts";
@@ -74,7 +76,7 @@ function shiftOverWidth(
   const { name } = filter.stage;
   if (window.kind === "no-window")
     return notApplicable(`${name} has no window that could move: ${window.reason}`);
-  const flight = flightOf(setting);
+  const flight = flightThrough(filter.stage, filter.pointer, mz);
   const missing = [
     ...flight.missing,
     ...(window.kind === "unknown" ? window.missing : []),
@@ -95,28 +97,14 @@ function shiftOverWidth(
     passesIf: () =>
       pass.max === null
         ? null
-        : passesIfWithin(leverOn(pointer, "s-1", { minValue: 1e-3, maxValue: 1e8 }), {
+        : passesIfWithin(leverOn(pointer, "s-1", ScanRate_mzPerS), {
             min: null,
             max: (pass.max * widthOf(window)) / time,
           }),
     statement:
-      `At ${rate} m/z per s the window of ${name} moves by ${digits(value, 3)} of its width while m/z ${mz} flies through in ${digits(time * 1e6, 4)} us.` +
+      `At ${rate} m/z per s the window of ${name} moves by ${digits(value, 3)} of its width while m/z ${mz} flies through in ${digits(microsecondsFromSeconds(time), 4)} us.` +
       (loss === null ? "" : ` A shift like this lowers the peak by about ${digits(100 * loss, 2)} %.`) +
       " The position holds only where m/z was calibrated at this rate." +
       heightNote(window),
   };
-}
-
-interface Flight {
-  readonly time: number | null;
-  readonly missing: readonly string[];
-}
-
-function flightOf({ filter, mz }: Filtering): Flight {
-  const { residence, rodSet } = filter.stage;
-  if (residence === undefined) return { time: null, missing: [`${filter.pointer}/residence`] };
-  if ("flightTime_us" in residence) return { time: residence.flightTime_us * 1e-6, missing: [] };
-  if (rodSet === undefined) return { time: null, missing: [`${filter.pointer}/rodSet`] };
-  const time = flightTimeOf(residence, rodSet, mz);
-  return { time, missing: time === null ? [`${filter.pointer}/rodSet/rodLength_mm`] : [] };
 }

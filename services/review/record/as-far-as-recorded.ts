@@ -1,5 +1,5 @@
-import { type Outcome, worstOutcome } from "../finding.ts";
 import type { SignOffResult } from "../sign-off-schema.ts";
+import { countOutcomes, verdictOf } from "../verdict.ts";
 import { membersOf } from "./kept-record.ts";
 
 /**
@@ -17,23 +17,13 @@ export function asFarAsRecorded(
   );
   if (checksAdded.length === 0) return { result, checksAdded };
   const remaining = result.findings.filter(({ check }) => known.has(check));
-  const counts: Record<Outcome, number> = {
-    pass: 0,
-    caution: 0,
-    fail: 0,
-    indeterminate: 0,
-    "not-applicable": 0,
-  };
-  for (const { outcome } of remaining) counts[outcome]++;
   return {
     checksAdded,
     result: {
       ...result,
       findings: remaining,
-      outcomeCounts: counts,
-      verdict:
-        worstOutcome(remaining.filter(({ required }) => required).map(({ outcome }) => outcome)) ??
-        "indeterminate",
+      outcomeCounts: countOutcomes(remaining),
+      verdict: verdictOf(remaining),
       notShown: result.notShown.filter(({ check }) => known.has(check)),
       waivers: result.waivers.filter(({ check }) => known.has(check)),
     },

@@ -1,3 +1,4 @@
+import { memberPointer } from "../../contract/json-pointer.ts";
 import { agree } from "./agreement.ts";
 import { canonicalJson } from "./digest.ts";
 import { findingKey } from "./finding-key.ts";
@@ -128,7 +129,7 @@ function compare(
     const added = Array.isArray(recorded) || comparison.additions === "count" ? Object.keys(recomputed) : [];
     for (const name of new Set([...Object.keys(recorded), ...added])) {
       if (PROSE.has(name)) continue;
-      const at = `${pointer}/${name.replaceAll("~", "~0").replaceAll("/", "~1")}`;
+      const at = memberPointer(pointer, name);
       compare(ownMember(recorded, name), ownMember(recomputed, name), at, 0, comparison);
     }
   } else if (recorded !== recomputed) {

@@ -1,3 +1,4 @@
+import { memberPointer } from "../../contract/json-pointer.ts";
 import type { ErrorItem } from "../../contract/rule.ts";
 
 /**
@@ -33,7 +34,7 @@ export function keptRecordErrors(record: unknown, pointer: string): ErrorItem[] 
       for (const [name, member] of Object.entries(value)) {
         if (LONE_SURROGATE.test(name)) {
           add(at, "wrong-format", "The name of a member holds half a character (a lone surrogate).");
-        } else visit(member, `${at}/${name.replaceAll("~", "~0").replaceAll("/", "~1")}`, depth + 1);
+        } else visit(member, memberPointer(at, name), depth + 1);
       }
     }
   };

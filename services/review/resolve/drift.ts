@@ -1,3 +1,4 @@
+import { ratioFromPpm } from "../../contract/si.ts";
 import {
   edgeSensitivities,
   sensitivitiesForResolution,
@@ -28,7 +29,9 @@ export function driftOf(tolerances: Tolerances | undefined, window: KnownWindow)
   const sensitivity = ratio_ppm === 0 ? null : sensitivityOf(window);
   if (ratio_ppm !== 0 && sensitivity === null) return null;
   const inward = (mz: number, ratio: number) =>
-    Math.max(mz * common, mzDriftBetweenTunes) + mzCalibration + mz * Math.abs(ratio) * ratio_ppm * 1e-6;
+    Math.max(mz * common, mzDriftBetweenTunes) +
+    mzCalibration +
+    mz * Math.abs(ratio) * ratioFromPpm(ratio_ppm);
   return {
     low: inward(window.mzLow, sensitivity?.low.ratio ?? 0),
     high: inward(window.mzHigh, sensitivity?.high.ratio ?? 0),
@@ -38,7 +41,7 @@ export function driftOf(tolerances: Tolerances | undefined, window: KnownWindow)
 
 /** m/z is proportional to V / (f r0)^2: relative shift of both edges, in the worst case. */
 function commonShift({ amplitude_ppm = 0, frequency_ppm = 0, fieldRadius_ppm = 0 }: Tolerances): number {
-  return (amplitude_ppm + 2 * frequency_ppm + 2 * fieldRadius_ppm) * 1e-6;
+  return ratioFromPpm(amplitude_ppm + 2 * frequency_ppm + 2 * fieldRadius_ppm);
 }
 
 function sensitivityOf(window: KnownWindow): WindowSensitivity | null {
